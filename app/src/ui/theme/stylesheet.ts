@@ -1,0 +1,45 @@
+// The few rules that only a stylesheet can say: theme variables, the focus ring, reduced motion, font faces.
+
+import { fontFaceRules } from "./fonts.ts";
+import { type ColorName, dark, light, type Palette } from "./tokens.ts";
+
+const STYLE_ID = "linkwright-theme";
+
+function declarations(palette: Palette): string {
+  return (Object.keys(palette) as ColorName[]).map((name) => `--${name}:${palette[name]}`).join(";");
+}
+
+function themeRules(): string {
+  return `
+:root{color-scheme:light;${declarations(light)}}
+@media (prefers-color-scheme:dark){:root:not([data-theme=light]){color-scheme:dark;${declarations(dark)}}}
+:root[data-theme=dark]{color-scheme:dark;${declarations(dark)}}
+html,body{background:var(--ground);color:var(--ink)}
+a{color:inherit}
+:focus{outline:none}
+:focus-visible{outline:2px solid var(--dye)!important;outline-offset:2px}
+.on-steel :focus-visible{outline-color:${dark.dye}!important}
+::selection{background:var(--dye);color:var(--onDye)}
+::placeholder{color:var(--inkSoft);opacity:1}
+input,textarea,select,button{font:inherit}
+select option{background:var(--panel);color:var(--ink)}
+dialog{border:0;padding:0;background:transparent;color:inherit;max-width:none;max-height:none}
+dialog::backdrop{background:var(--veil)}
+.skip-link{position:absolute;left:8px;top:-100px;z-index:100;background:var(--dye);color:var(--onDye);padding:12px 16px}
+.skip-link:focus{top:8px}
+.visually-hidden{position:absolute;width:1px;height:1px;margin:-1px;overflow:hidden;clip-path:inset(50%);white-space:nowrap}
+@keyframes lw-breathe{0%,100%{opacity:1}50%{opacity:.45}}
+.breathes{animation:lw-breathe 1.6s ease-in-out infinite}
+@media (prefers-reduced-motion:reduce){*,*::before,*::after{animation:none!important;transition:none!important;scroll-behavior:auto!important}}
+@media print{.no-print{display:none!important}}
+`;
+}
+
+/** Idempotent; called once before the first render. */
+export function installStylesheet(): void {
+  if (document.getElementById(STYLE_ID)) return;
+  const style = document.createElement("style");
+  style.id = STYLE_ID;
+  style.textContent = fontFaceRules() + themeRules();
+  document.head.append(style);
+}
