@@ -1,0 +1,17 @@
+export * from "./auth.ts";
+export { AxleSchema } from "./axle.ts";
+export * from "./builds.ts";
+export * from "./cautions.ts";
+export * from "./comments.ts";
+export * from "./documents.ts";
+export * from "./edits.ts";
+export * from "./policy.ts";
+export * from "./primitives.ts";
+export * from "./problems.ts";
+export * from "./revisions.ts";
+export * from "./route.ts";
+export * from "./routes.ts";
+export * from "./sheets.ts";
+export * from "./studies.ts";
+export { StudySchema } from "./study.ts";
+export * from "./workshops.ts";
