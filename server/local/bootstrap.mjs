@@ -1,0 +1,96 @@
+// The one door of `npm start`, `npm run dev` and `npm test`. It runs before any npm package is there, so this file and
+// the .mjs files beside it use Node alone: they make the machine ready, then hand over to a TypeScript program.
+import { mkdirSync } from "node:fs";
+import { constants } from "node:os";
+import { dirname, join, resolve } from "node:path";
+import { fileURLToPath, pathToFileURL } from "node:url";
+import { parseArgs } from "node:util";
+import { ensureDebianPackages, findMissing } from "./debianPackages.mjs";
+import { holdLock, readLock } from "./lock.mjs";
+import { ensureNpmPackages, findMismatch } from "./npmPackages.mjs";
+import { createSteps, PlainProblem } from "./steps.mjs";
+
+const OLDEST_NODE = [20, 19, 4];
+const root = resolve(dirname(fileURLToPath(import.meta.url)), "../..");
+const dataFolder = join(root, ".data");
+
+/** One signal for the whole run: the first Ctrl-C stops in order, the second leaves the children to the kernel. */
+function listenForStop() {
+  const stop = new AbortController();
+  for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) {
+    process.on(signal, () => {
+      if (stop.signal.aborted) {
+        process.stderr.write("\nStopping at once.\n");
+        process.exit(128 + constants.signals[signal]);
+      }
+      stop.abort(signal);
+    });
+  }
+  return stop.signal;
+}
+
+function requireNode() {
+  const have = process.versions.node.split(".").map(Number);
+  const at = OLDEST_NODE.findIndex((part, index) => have[index] !== part);
+  if (at !== -1 && have[at] < OLDEST_NODE[at]) {
+    throw new PlainProblem(
+      `Node ${process.versions.node} is too old: install Node 20 (at least ${OLDEST_NODE.join(".")}) and run this again.`,
+    );
+  }
+}
+
+function makeDataFolder() {
+  try {
+    mkdirSync(join(dataFolder, "logs"), { recursive: true });
+  } catch (error) {
+    throw new PlainProblem(
+      `This user may not write ${dataFolder} (${error.code}): run as the user who owns the folder, or as root.`,
+    );
+  }
+}
+
+async function makeReady(needs, context) {
+  if (findMissing(needs).length === 0 && findMismatch(root) === null) return;
+  const lock = holdLock(
+    join(dataFolder, "setup.json"),
+    (holder) =>
+      `Another set-up is at work in this folder (process ${holder.pid}): wait until it is through, then run this again.`,
+  );
+  try {
+    await ensureDebianPackages(needs, context);
+    await ensureNpmPackages({ ...context, running: readLock(join(dataFolder, "running.json")) });
+  } finally {
+    lock.release();
+  }
+}
+
+async function main() {
+  const stop = listenForStop();
+  const { values, positionals } = parseArgs({
+    options: { needs: { type: "string", default: "" }, only: { type: "string" } },
+    allowPositionals: true,
+  });
+  const [program, ...args] = positionals;
+  const context = { root, dataFolder, stop, args, only: values.only, ...createSteps() };
+  try {
+    requireNode();
+    makeDataFolder();
+    await makeReady(values.needs.split(",").filter(Boolean), context);
+    stop.throwIfAborted();
+    const { register } = await import("tsx/esm/api");
+    register();
+    const { run } = await import(pathToFileURL(join(root, program)).href);
+    return await run(context);
+  } catch (error) {
+    if (stop.aborted) {
+      process.stdout.write("Stopped before everything was up.\n");
+      return 128 + constants.signals[stop.reason];
+    }
+    process.stderr.write(
+      error?.name?.endsWith("Problem") ? `\n${error.message}\n` : `\n${error?.stack ?? error}\n`,
+    );
+    return 1;
+  }
+}
+
+process.exitCode = await main();
