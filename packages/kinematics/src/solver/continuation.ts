@@ -1,0 +1,145 @@
+// Staying on one assembly: the pose is carried from where it stands along a path of inputs, in steps that shrink
+// where the linkage turns quickly, and never across a position in which the Jacobian changes sign.
+
+import { type PoseSystem, STRIDE } from "./constraints.ts";
+import { eliminate, evaluate, solvePose } from "./newton.ts";
+
+/** mm of input. A path that cannot go on is narrowed down to this; larger blurs the last good travel. */
+const FINEST_STEP = 1e-9;
+
+/** mm of input (or degrees) in one step: well inside what contracts for arms of a car's size. */
+const LONGEST_STEP = 20;
+
+const POSE = 7;
+
+/** A straight line of inputs. `place` writes those at `fraction` (0 … 1) of it into the system. */
+export interface InputPath {
+  /** Its length, mm or degrees of input. */
+  readonly length: number;
+  place(fraction: number): void;
+}
+
+export type FollowOutcome =
+  | { readonly status: "arrived" }
+  /** The inputs could not be followed beyond `fraction`; the system stands there, assembled. */
+  | { readonly status: "stopped"; readonly fraction: number };
+
+/** Follows `path` from its beginning, where the system must stand assembled. `branch`: see branchOf. */
+export function follow(system: PoseSystem, path: InputPath, branch: number): FollowOutcome {
+  const { pose } = system;
+  const lastGood = Float64Array.from(pose);
+  const finest = FINEST_STEP / Math.max(path.length, FINEST_STEP);
+  let step = Math.min(1, LONGEST_STEP / Math.max(path.length, FINEST_STEP));
+  let fraction = 0;
+  while (fraction < 1) {
+    const next = Math.min(1, fraction + step);
+    path.place(next);
+    if (solvePose(system) >= 0 && branchOf(system) === branch) {
+      fraction = next;
+      lastGood.set(pose);
+      step *= 2;
+      continue;
+    }
+    pose.set(lastGood);
+    step = (next - fraction) / 2;
+    if (step < finest) {
+      path.place(fraction);
+      return { status: "stopped", fraction };
+    }
+  }
+  return { status: "arrived" };
+}
+
+/** Sign of the Jacobian's determinant at the present pose: it keeps its sign on one assembly. 0: singular. */
+export function branchOf(system: PoseSystem): number {
+  evaluate(system);
+  return eliminate(system.work, system.step, system.report) ? Math.sign(system.report[0] as number) : 0;
+}
+
+/**
+ * Solves a column of poses over the values of one drive, the hot path of every sweep: `values[0]` is where the
+ * system stands assembled, `poses` takes 7 numbers a value (qw qx qy qz tx ty tz). Returns how many values were
+ * reached; when fewer than all, `limit[0]` is the last value that could be.
+ *
+ * Evenly spaced values are predicted by the cubic through the four poses before (error of the order step⁴), so
+ * that one elimination usually closes a pose; everything else goes the careful way of `follow`.
+ */
+export function followColumn(
+  system: PoseSystem,
+  drive: number,
+  values: Float64Array,
+  poses: Float64Array,
+  branch: number,
+  limit: Float64Array,
+): number {
+  const { pose, table } = system;
+  const slot = drive * STRIDE + 9;
+  poses.set(pose, 0);
+  for (let i = 1; i < values.length; i++) {
+    const value = values[i] as number;
+    const before = values[i - 1] as number;
+    table[slot] = value;
+    if (predict(poses, i, values, pose)) {
+      // A prediction off by more than a tenth of the step has missed a bend: go carefully.
+      if (solvePose(system, 0.1 * Math.abs(value - before)) >= 0 && signOfReport(system) === branch) {
+        poses.set(pose, i * POSE);
+        continue;
+      }
+    }
+    for (let k = 0; k < POSE; k++) pose[k] = poses[(i - 1) * POSE + k] as number;
+    const path: InputPath = {
+      length: Math.abs(value - before),
+      place: (fraction) => {
+        table[slot] = fraction === 1 ? value : before + (value - before) * fraction;
+      },
+    };
+    const outcome = follow(system, path, branch);
+    if (outcome.status === "stopped") {
+      limit[0] = before + (value - before) * outcome.fraction;
+      return i;
+    }
+    poses.set(pose, i * POSE);
+  }
+  limit[0] = values[values.length - 1] as number;
+  return values.length;
+}
+
+/** The sign of the last elimination's determinant, one Newton step short of the pose: free, and enough here. */
+function signOfReport(system: PoseSystem): number {
+  return Math.sign(system.report[0] as number);
+}
+
+/** Extrapolates the pose of value `i` from the four before; false where there are not four, evenly spaced. */
+function predict(poses: Float64Array, i: number, values: Float64Array, pose: Float64Array): boolean {
+  if (i < 4) return false;
+  const step = (values[i] as number) - (values[i - 1] as number);
+  for (let k = 1; k < 4; k++) {
+    const earlier = (values[i - k] as number) - (values[i - k - 1] as number);
+    if (!(Math.abs(earlier - step) <= 1e-9 * Math.abs(step))) return false;
+  }
+  const last = (i - 1) * POSE;
+  for (let k = 0; k < POSE; k++) {
+    const a = poses[last + k] as number;
+    const b = poses[last - POSE + k] as number;
+    const c = poses[last - 2 * POSE + k] as number;
+    const d = poses[last - 3 * POSE + k] as number;
+    pose[k] = 4 * a - 6 * b + 4 * c - d;
+  }
+  const qw = pose[0] as number;
+  const qx = pose[1] as number;
+  const qy = pose[2] as number;
+  const qz = pose[3] as number;
+  const unit = 1 / Math.sqrt(qw * qw + qx * qx + qy * qy + qz * qz);
+  pose[0] = qw * unit;
+  pose[1] = qx * unit;
+  pose[2] = qy * unit;
+  pose[3] = qz * unit;
+  return true;
+}
+
+/** The twist per unit of one drive at the present, solved pose, into `system.step`. False: singular. */
+export function solveDriveTwist(system: PoseSystem, drive: number): boolean {
+  evaluate(system);
+  for (let e = 0; e < 6; e++) system.work[e * 7 + 6] = e === drive ? 1 : 0;
+  return eliminate(system.work, system.step, system.report);
+}
