@@ -1,0 +1,318 @@
+// Random but believable front axles of light cars, for fast-check: mm, ISO 8855 axes, written for the left.
+// Common practice gives the ranges: kingpin 5–14°, caster 0–8°, arms of 180–400 mm, steering arm ahead or behind.
+
+import type { Axle, Coordinates, Corner, SpringMount } from "@linkwright/kinematics";
+import fc from "fast-check";
+
+/**
+ * Fixed seed, so that a failure is the same everywhere; one skip per run at most, so that a property cannot pass while
+ * most of its axles never solve.
+ */
+export const PROPERTY_RUNS = { seed: 20261201, numRuns: 100, maxSkipsPerRun: 1 } as const;
+
+/** For properties whose single run sweeps a whole axle. */
+export const SLOW_PROPERTY_RUNS = { ...PROPERTY_RUNS, numRuns: 30 } as const;
+
+/** Hundredths of a unit: whole numbers shrink to something a person can read. */
+function between(low: number, high: number): fc.Arbitrary<number> {
+  return fc.integer({ min: Math.round(low * 100), max: Math.round(high * 100) }).map((n) => n / 100);
+}
+
+const tangent = (degrees: number): number => Math.tan((degrees * Math.PI) / 180);
+
+const anyWheel = fc.record({
+  centreX: between(-20, 20),
+  centreY: between(540, 740),
+  centreZ: between(240, 340),
+  toeDeg: between(-0.5, 0.5),
+  camberDeg: between(-2, 1.5),
+  loadedRadius: between(240, 340),
+});
+
+const anyKingpin = fc.record({
+  /** Lower ball joint from the wheel centre. */
+  lowerX: between(-12, 20),
+  inset: between(40, 95),
+  below: between(90, 150),
+  height: between(190, 290),
+  casterDeg: between(0, 8),
+  inclinationDeg: between(5, 14),
+});
+
+const anyArm = (lengths: readonly [number, number], drop: readonly [number, number]) =>
+  fc.record({
+    length: between(...lengths),
+    /** Of the pivots above the ball joint. */
+    rise: between(...drop),
+    ahead: between(60, 180),
+    behind: between(60, 200),
+    skewY: between(-15, 15),
+    skewZ: between(-12, 12),
+  });
+
+const anyTieRod = fc.record({
+  side: fc.constantFrom(1, -1),
+  /** From the lower ball joint. */
+  reach: between(85, 140),
+  outboard: between(-30, 25),
+  above: between(15, 90),
+  length: between(230, 380),
+  innerRise: between(-15, 15),
+  innerAhead: between(-20, 20),
+});
+
+const anySpring = fc.record({
+  on: fc.constantFrom<SpringMount>("lowerArm", "upperArm", "knuckle"),
+  along: between(0.4, 0.85),
+  body: fc.record({ x: between(-30, 30), y: between(-140, -20), z: between(180, 320) }),
+});
+
+function wishbone(
+  ballJoint: Coordinates,
+  arm: { length: number; rise: number; ahead: number; behind: number; skewY: number; skewZ: number },
+) {
+  const [x, y, z] = ballJoint;
+  return {
+    frontPivot: [x + arm.ahead, y - arm.length + arm.skewY, z + arm.rise + arm.skewZ],
+    rearPivot: [x - arm.behind, y - arm.length - arm.skewY, z + arm.rise - arm.skewZ],
+    ballJoint,
+  } as const;
+}
+
+function pointAlong(from: Coordinates, to: Coordinates, share: number): Coordinates {
+  return [
+    from[0] + share * (to[0] - from[0]),
+    from[1] + share * (to[1] - from[1]),
+    from[2] + share * (to[2] - from[2]),
+  ];
+}
+
+/** A left corner that a light car could have. */
+export function anyCorner(): fc.Arbitrary<Corner> {
+  return fc
+    .record({
+      wheel: anyWheel,
+      kingpin: anyKingpin,
+      lower: anyArm([250, 400], [-15, 30]),
+      upper: anyArm([180, 300], [-40, 10]),
+      tieRod: anyTieRod,
+      spring: anySpring,
+    })
+    .map(({ wheel, kingpin, lower, upper, tieRod, spring }) => {
+      const lowerJoint: Coordinates = [
+        wheel.centreX + kingpin.lowerX,
+        wheel.centreY - kingpin.inset,
+        wheel.centreZ - kingpin.below,
+      ];
+      const upperJoint: Coordinates = [
+        lowerJoint[0] - kingpin.height * tangent(kingpin.casterDeg),
+        lowerJoint[1] - kingpin.height * tangent(kingpin.inclinationDeg),
+        lowerJoint[2] + kingpin.height,
+      ];
+      const lowerArm = wishbone(lowerJoint, lower);
+      const upperArm = wishbone(upperJoint, upper);
+      const outer: Coordinates = [
+        lowerJoint[0] + tieRod.side * tieRod.reach,
+        lowerJoint[1] + tieRod.outboard,
+        lowerJoint[2] + tieRod.above,
+      ];
+      const inner: Coordinates = [
+        outer[0] + tieRod.innerAhead,
+        outer[1] - tieRod.length,
+        outer[2] + tieRod.innerRise,
+      ];
+      const arm = spring.on === "upperArm" ? upperArm : lowerArm;
+      const pivot = pointAlong(arm.frontPivot, arm.rearPivot, 0.5);
+      const eye = pointAlong(pivot, arm.ballJoint, spring.along);
+      return {
+        suspension: { type: "doubleWishbone", lowerArm, upperArm },
+        tieRod: { inner, outer },
+        wheel: {
+          centre: [wheel.centreX, wheel.centreY, wheel.centreZ],
+          toeDeg: wheel.toeDeg,
+          camberDeg: wheel.camberDeg,
+          loadedRadius: wheel.loadedRadius,
+        },
+        spring: {
+          on: spring.on,
+          lower: eye,
+          body: [eye[0] + spring.body.x, eye[1] + spring.body.y, eye[2] + spring.body.z],
+        },
+      } satisfies Corner;
+    });
+}
+
+/** The same hardpoints on the other side of the car, so that unequal sides can be told apart from a mirror. */
+export function acrossTheCar(corner: Corner): Corner {
+  const flip = ([x, y, z]: Coordinates): Coordinates => [x, -y, z];
+  const arm = (wishbone: Corner["suspension"]["lowerArm"]) => ({
+    frontPivot: flip(wishbone.frontPivot),
+    rearPivot: flip(wishbone.rearPivot),
+    ballJoint: flip(wishbone.ballJoint),
+  });
+  return {
+    ...corner,
+    suspension: {
+      ...corner.suspension,
+      lowerArm: arm(corner.suspension.lowerArm),
+      upperArm: arm(corner.suspension.upperArm),
+    },
+    tieRod: { inner: flip(corner.tieRod.inner), outer: flip(corner.tieRod.outer) },
+    wheel: { ...corner.wheel, centre: flip(corner.wheel.centre) },
+    ...(corner.spring
+      ? { spring: { ...corner.spring, lower: flip(corner.spring.lower), body: flip(corner.spring.body) } }
+      : {}),
+  };
+}
+
+/** A front axle with a rack, its right side a mirror or a corner of its own. */
+export function anyAxle(): fc.Arbitrary<Axle> {
+  return fc
+    .record({
+      left: anyCorner(),
+      right: fc.option(anyCorner(), { nil: "mirror" as const, freq: 2 }),
+      wheelbase: between(2000, 2800),
+      tiltX: between(-0.05, 0.05),
+      tiltZ: between(-0.05, 0.05),
+      cgHeight: between(400, 650),
+      frontBrakeShare: between(0.5, 0.8),
+    })
+    .map(({ left, right, wheelbase, tiltX, tiltZ, cgHeight, frontBrakeShare }) => ({
+      format: "linkwright.axle/1",
+      name: "A light front axle",
+      position: "front",
+      wheelbase,
+      left,
+      right: right === "mirror" ? right : acrossTheCar(right),
+      steering: { type: "rack", axis: [tiltX, 1, tiltZ], travel: 60 },
+      body: { cgHeight, frontBrakeShare },
+    }));
+}
+
+/** A rear axle of the same kind with a toe link on the body. */
+export function anyRearAxle(): fc.Arbitrary<Axle> {
+  return anyAxle().map((axle) => ({
+    ...axle,
+    name: "A light rear axle",
+    position: "rear",
+    steering: { type: "fixed" },
+    body: { ...axle.body, driveShare: 1 },
+  }));
+}
+
+export interface Input {
+  readonly travel: number;
+  readonly steer: number;
+}
+
+/** Wheel travel and rack movement that most of these axles reach. */
+export function anyInput(): fc.Arbitrary<Input> {
+  return fc.record({ travel: between(-70, 70), steer: between(-45, 45) });
+}
+
+const anywhere = fc.oneof(
+  { weight: 3, arbitrary: between(-800, 800) },
+  { weight: 1, arbitrary: fc.constantFrom(0, 0, 1e-9, -1e-9, 100, 4999, -4999, 6000) },
+  { weight: 1, arbitrary: fc.double({ noNaN: true, noDefaultInfinity: true, min: -1e4, max: 1e4 }) },
+);
+const anyPoint: fc.Arbitrary<Coordinates> = fc.tuple(anywhere, anywhere, anywhere);
+
+/** Hardpoints anywhere, often on one another or in line: nothing a shop would build, much of it unbuildable. */
+export function anyNastyAxle(): fc.Arbitrary<Axle> {
+  const nastyArm = fc
+    .record({ frontPivot: anyPoint, rearPivot: anyPoint, ballJoint: anyPoint, collapse: fc.nat({ max: 9 }) })
+    .map(({ frontPivot, rearPivot, ballJoint, collapse }) => ({
+      frontPivot,
+      rearPivot:
+        collapse === 0 ? frontPivot : collapse === 1 ? pointAlong(frontPivot, ballJoint, 0.5) : rearPivot,
+      ballJoint: collapse === 2 ? rearPivot : ballJoint,
+    }));
+  return fc
+    .record({
+      lowerArm: nastyArm,
+      upperArm: nastyArm,
+      inner: anyPoint,
+      outer: anyPoint,
+      centre: fc.tuple(anywhere, between(1, 900), anywhere),
+      toeDeg: between(-30, 30),
+      camberDeg: between(-40, 40),
+      loadedRadius: between(1, 600),
+      axis: fc.constantFrom<Coordinates>([0, 1, 0], [1, 1e-6, 0], [0, 1, 50], [3, 1, -2]),
+      fixed: fc.boolean(),
+      front: fc.boolean(),
+      springOn: fc.constantFrom<SpringMount>("lowerArm", "upperArm", "knuckle"),
+      springBody: anyPoint,
+      springLower: anyPoint,
+    })
+    .map((raw) => ({
+      format: "linkwright.axle/1",
+      name: "Hardpoints anywhere",
+      position: raw.front ? "front" : "rear",
+      wheelbase: 2400,
+      left: {
+        suspension: { type: "doubleWishbone", lowerArm: raw.lowerArm, upperArm: raw.upperArm },
+        tieRod: { inner: raw.inner, outer: raw.outer },
+        wheel: {
+          centre: raw.centre,
+          toeDeg: raw.toeDeg,
+          camberDeg: raw.camberDeg,
+          loadedRadius: raw.loadedRadius,
+        },
+        spring: { on: raw.springOn, body: raw.springBody, lower: raw.springLower },
+      },
+      right: "mirror",
+      steering: raw.fixed ? { type: "fixed" } : { type: "rack", axis: raw.axis, travel: 60 },
+      body: { cgHeight: 500, frontBrakeShare: 0.6, driveShare: 1 },
+    }));
+}
+
+/** Pulls one dimension of a believable axle to where something must give: dead points, lost reach, coplanar links. */
+export function anyStrainedAxle(): fc.Arbitrary<Axle> {
+  return fc
+    .record({ axle: anyAxle(), how: fc.nat({ max: 4 }), by: between(0, 1) })
+    .map(({ axle, how, by }) => {
+      const { left } = axle;
+      const { lowerArm, upperArm } = left.suspension;
+      const strain = (corner: Partial<Corner>): Axle => ({
+        ...axle,
+        right: "mirror",
+        left: { ...left, ...corner },
+      });
+      switch (how) {
+        case 0: // tie rod in line with the steering arm
+          return strain({
+            tieRod: { ...left.tieRod, inner: pointAlong(left.tieRod.outer, lowerArm.ballJoint, 3 + by) },
+          });
+        case 1: // an upper arm so short that travel runs out
+          return strain({
+            suspension: {
+              ...left.suspension,
+              upperArm: {
+                ...upperArm,
+                frontPivot: pointAlong(upperArm.ballJoint, upperArm.frontPivot, 0.1 + 0.2 * by),
+                rearPivot: pointAlong(upperArm.ballJoint, upperArm.rearPivot, 0.1 + 0.2 * by),
+              },
+            },
+          });
+        case 2: // both arms on one pivot line
+          return strain({
+            suspension: {
+              ...left.suspension,
+              upperArm: { ...upperArm, frontPivot: lowerArm.frontPivot, rearPivot: lowerArm.rearPivot },
+            },
+          });
+        case 3: // a tie rod on the kingpin
+          return strain({
+            tieRod: { ...left.tieRod, outer: pointAlong(lowerArm.ballJoint, upperArm.ballJoint, by) },
+          });
+        default: // a spring whose eyes meet
+          return strain({
+            spring: {
+              on: "knuckle",
+              lower: left.wheel.centre,
+              body: pointAlong(left.wheel.centre, [0, 0, 0], by / 10),
+            },
+          });
+      }
+    });
+}
