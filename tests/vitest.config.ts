@@ -14,7 +14,7 @@ export default defineConfig({
           include: [
             "{packages/*,server,app,db}/src/**/*.test.{ts,tsx}",
             "server/local/**/*.test.ts",
-            "tests/{published,properties,architecture,helpers}/**/*.test.ts",
+            "tests/{published,properties,architecture,helpers,run}/**/*.test.ts",
           ],
         },
       },

@@ -1,10 +1,10 @@
 // The one door of `npm start`, `npm run dev` and `npm test`. It runs before any npm package is there, so this file and
 // the .mjs files beside it use Node alone: they make the machine ready, then hand over to a TypeScript program.
+// Arguments: the Debian packages it needs, the program, and what the program gets.
 import { mkdirSync } from "node:fs";
 import { constants } from "node:os";
 import { dirname, join, resolve } from "node:path";
 import { fileURLToPath, pathToFileURL } from "node:url";
-import { parseArgs } from "node:util";
 import { ensureDebianPackages, findMissing } from "./debianPackages.mjs";
 import { holdLock, readLock } from "./lock.mjs";
 import { ensureNpmPackages, findMismatch } from "./npmPackages.mjs";
@@ -66,16 +66,16 @@ async function makeReady(needs, context) {
 
 async function main() {
   const stop = listenForStop();
-  const { values, positionals } = parseArgs({
-    options: { needs: { type: "string", default: "" }, only: { type: "string" } },
-    allowPositionals: true,
-  });
-  const [program, ...args] = positionals;
-  const context = { root, dataFolder, stop, args, only: values.only, ...createSteps() };
+  const [needs, program, ...args] = process.argv.slice(2);
+  const locks = {
+    holdLock: (name, explain) => holdLock(join(dataFolder, name), explain),
+    readLock: (name) => readLock(join(dataFolder, name)),
+  };
+  const context = { root, dataFolder, stop, args, ...createSteps(), ...locks };
   try {
     requireNode();
     makeDataFolder();
-    await makeReady(values.needs.split(",").filter(Boolean), context);
+    await makeReady(needs.split(","), context);
     stop.throwIfAborted();
     const { register } = await import("tsx/esm/api");
     register();
