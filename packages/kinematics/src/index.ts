@@ -14,6 +14,28 @@ export { steeringLock, steeringUnit } from "./model/steering/index.ts";
 export type * from "./model/study.ts";
 export { STUDY_FORMAT, TARGET_QUANTITIES } from "./model/study.ts";
 export { checkAxle, checkStudy } from "./pose/checkAxle.ts";
+export { type AxleInputs, type CornerPlacement, poseAxle } from "./pose/poseAxle.ts";
+export {
+  type Band,
+  type BumpSteerCurve,
+  type BumpSteerFigures,
+  bandTravels,
+  bumpSteerCurve,
+  bumpSteerCurves,
+  summariseCurve,
+  worseOf,
+} from "./studies/bumpSteer.ts";
+export {
+  applyMoves,
+  type FlattenOutcome,
+  type FlattenRequest,
+  type FreeMove,
+  flatten,
+  type HeightResult,
+} from "./studies/flatten/flatten.ts";
+export { applyMove, MOVES, type Move, whyNotMove } from "./studies/flatten/moves.ts";
+export { type Fault, findFaults } from "./studies/safety/faults.ts";
+export { steerPerInput } from "./studies/safety/steeringDirection.ts";
 export type { AxleRow } from "./sweeps/axleRow.ts";
 export type { SideRow } from "./sweeps/sideRow.ts";
 export {

@@ -1,7 +1,7 @@
 // Staying on one assembly: the pose is carried from where it stands along a path of inputs, in steps that shrink
 // where the linkage turns quickly, and never across a position in which the Jacobian changes sign.
 
-import { type PoseSystem, STRIDE } from "./constraints.ts";
+import { EQUATIONS, type PoseSystem, STRIDE } from "./constraints.ts";
 import { eliminate, evaluate, solvePose } from "./newton.ts";
 
 /** mm of input. A path that cannot go on is narrowed down to this; larger blurs the last good travel. */
@@ -11,6 +11,8 @@ const FINEST_STEP = 1e-9;
 const LONGEST_STEP = 20;
 
 const POSE = 7;
+
+const WIDTH = EQUATIONS + 1;
 
 /** A straight line of inputs. `place` writes those at `fraction` (0 … 1) of it into the system. */
 export interface InputPath {
@@ -140,6 +142,24 @@ function predict(poses: Float64Array, i: number, values: Float64Array, pose: Flo
 /** The twist per unit of one drive at the present, solved pose, into `system.step`. False: singular. */
 export function solveDriveTwist(system: PoseSystem, drive: number): boolean {
   evaluate(system);
-  for (let e = 0; e < 6; e++) system.work[e * 7 + 6] = e === drive ? 1 : 0;
+  for (let e = 0; e < EQUATIONS; e++) system.work[e * WIDTH + EQUATIONS] = e === drive ? 1 : 0;
   return eliminate(system.work, system.step, system.report);
+}
+
+/**
+ * Solves Jᵀ y = g at the present, solved pose, into `system.step`: y is the derivative of a scalar whose gradient
+ * along the twist is `gradient` with respect to each equation's right-hand side. False: singular.
+ */
+export function solveAdjoint(system: PoseSystem, gradient: readonly number[]): boolean {
+  evaluate(system);
+  const { work } = system;
+  for (let e = 0; e < EQUATIONS; e++) {
+    for (let k = e + 1; k < EQUATIONS; k++) {
+      const kept = work[e * WIDTH + k] as number;
+      work[e * WIDTH + k] = work[k * WIDTH + e] as number;
+      work[k * WIDTH + e] = kept;
+    }
+    work[e * WIDTH + EQUATIONS] = gradient[e] as number;
+  }
+  return eliminate(work, system.step, system.report);
 }

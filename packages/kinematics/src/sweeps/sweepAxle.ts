@@ -3,7 +3,6 @@
 import { type CornerMeasures, measureCorner } from "../metrics/corner.ts";
 import type { Axle } from "../model/axle.ts";
 import { SIDES, type Side } from "../model/design.ts";
-import { bumpTwistAt } from "../pose/bumpTwist.ts";
 import {
   type CornerSolver,
   innerJointAt,
@@ -12,6 +11,7 @@ import {
   steerTo,
   travelColumn,
 } from "../pose/cornerSolver.ts";
+import { bumpTwistAt } from "../pose/gradients.ts";
 import { type AxleRow, axleRow } from "./axleRow.ts";
 import { type SideRow, sideRow } from "./sideRow.ts";
 

@@ -27,6 +27,16 @@ export const doubleWishbone: SuspensionKind<DoubleWishbone> = {
     return {
       rows: [...armLinks("lowerArm", lowerArm), ...armLinks("upperArm", upperArm)],
       steeringAxis: { lower: lowerArm.ballJoint, upper: upperArm.ballJoint },
+      bodyPoints: {
+        "lowerArm.frontPivot": lowerArm.frontPivot,
+        "lowerArm.rearPivot": lowerArm.rearPivot,
+        "upperArm.frontPivot": upperArm.frontPivot,
+        "upperArm.rearPivot": upperArm.rearPivot,
+      },
+      knucklePoints: {
+        "lowerArm.ballJoint": lowerArm.ballJoint,
+        "upperArm.ballJoint": upperArm.ballJoint,
+      },
       lowerArm: hinge(lowerArm),
       upperArm: hinge(upperArm),
     };

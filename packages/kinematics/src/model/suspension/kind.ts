@@ -18,6 +18,9 @@ export interface SuspensionParts {
   readonly rows: readonly ConstraintRow[];
   /** Lower and upper point of the steering axis, or null for a kind that has none. */
   readonly steeringAxis: { readonly lower: Point<"K">; readonly upper: Point<"K"> } | null;
+  /** Points by their path below `suspension`: fixed to the body, and carried by the knuckle. */
+  readonly bodyPoints: Readonly<Record<string, Point<"V">>>;
+  readonly knucklePoints: Readonly<Record<string, Point<"K">>>;
   readonly lowerArm: HingedArm | null;
   readonly upperArm: HingedArm | null;
 }
