@@ -3,6 +3,9 @@
 import { z } from "zod";
 import type { Action } from "./policy.ts";
 
+/** Every request that changes something carries this header, with any value: it proves a page of ours sent it. */
+export const CSRF_HEADER = "X-Linkwright-Request";
+
 /** Open to all, to whoever is signed in, or to a member of the workshop in the path whose role may do this. */
 export type Access = "public" | "signedIn" | Action;
 
