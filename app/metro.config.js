@@ -35,7 +35,8 @@ config.resolver.assetExts.push("woff2"); // not among the defaults
 const upstreamResolve = config.resolver.resolveRequest;
 config.resolver.resolveRequest = (context, name, platform) => {
   const resolve = upstreamResolve ?? context.resolveRequest;
-  const isZodLocales = /locales\/index\.c?js$/.test(name) && /[\\/]zod[\\/]v4[\\/]/.test(context.originModulePath);
+  const isZodLocales =
+    /locales\/index\.c?js$/.test(name) && /[\\/]zod[\\/]v4[\\/]/.test(context.originModulePath);
   return resolve(context, isZodLocales ? name.replace("index.", "en.") : name, platform);
 };
 

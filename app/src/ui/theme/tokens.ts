@@ -82,6 +82,8 @@ export const font = {
   figure: "'IBM Plex Mono', ui-monospace, monospace",
 } as const;
 
+const tabular: "tabular-nums"[] = ["tabular-nums"];
+
 export const type = {
   display: { fontFamily: font.head, fontWeight: "600", fontSize: 44, lineHeight: 48, letterSpacing: -0.4 },
   title: { fontFamily: font.head, fontWeight: "600", fontSize: 26, lineHeight: 32, letterSpacing: -0.1 },
@@ -92,8 +94,20 @@ export const type = {
   small: { fontFamily: font.text, fontWeight: "400", fontSize: 14, lineHeight: 20 },
   label: { fontFamily: font.head, fontWeight: "500", fontSize: 14, lineHeight: 18 },
   tableHead: { fontFamily: font.head, fontWeight: "600", fontSize: 14, lineHeight: 18 },
-  figure: { fontFamily: font.figure, fontWeight: "400", fontSize: 15, lineHeight: 20, fontVariant: ["tabular-nums"] },
-  figureSmall: { fontFamily: font.figure, fontWeight: "400", fontSize: 13, lineHeight: 18, fontVariant: ["tabular-nums"] },
-  figureLarge: { fontFamily: font.figure, fontWeight: "500", fontSize: 24, lineHeight: 30, fontVariant: ["tabular-nums"] },
+  figure: { fontFamily: font.figure, fontWeight: "400", fontSize: 15, lineHeight: 20, fontVariant: tabular },
+  figureSmall: {
+    fontFamily: font.figure,
+    fontWeight: "400",
+    fontSize: 13,
+    lineHeight: 18,
+    fontVariant: tabular,
+  },
+  figureLarge: {
+    fontFamily: font.figure,
+    fontWeight: "500",
+    fontSize: 24,
+    lineHeight: 30,
+    fontVariant: tabular,
+  },
 } as const;
 export type TypeName = keyof typeof type;
