@@ -20,6 +20,8 @@ export type Stopped =
   | "flat"
   /** The step has become smaller than matters. */
   | "smallStep"
+  /** Full steps make the sum smaller by less than matters. */
+  | "smallGain"
   /** No shorter step makes the sum smaller. */
   | "noDescent"
   | "tooManyIterations";
@@ -48,12 +50,16 @@ const MOST_ITERATIONS = 100;
 const FLAT = 1e-10;
 /** Of the range between the bounds. */
 const SMALL_STEP = 1e-9;
+/** Of the sum of squares; half the digits of the residuals' own round-off. */
+const SMALL_GAIN = 1e-10;
 const FIRST_DAMPING = 1e-3;
+/** Damping under which a step is as good as the undamped one, so that a small gain means an end, not a brake. */
+const LIGHT_DAMPING = 1e-2;
 const MOST_DAMPING = 1e12;
 
 /**
  * From `start` to the nearest constrained minimum. Each step minimises |J s + r|² + λ|D s|² over the unknowns that
- * no bound holds (D: the norms of J's columns), is cut off at the bounds, and is kept if the sum falls.
+ * no bound holds (D: the norms of J's columns), stays within the bounds, and is kept if the sum falls.
  * (K. Levenberg 1944, D. W. Marquardt 1963; the scaling by column norms after J. J. Moré, 1978.)
  */
 export function solveLeastSquares(
@@ -79,9 +85,10 @@ export function solveLeastSquares(
       break;
     }
     const moved = largestShareOfRange(problem, x, next.x);
+    const gain = (cost - next.cost) / cost;
     ({ x, here, cost, lambda } = next);
-    if (moved < SMALL_STEP) {
-      stopped = "smallStep";
+    if (moved < SMALL_STEP || (gain < SMALL_GAIN && lambda < LIGHT_DAMPING)) {
+      stopped = moved < SMALL_STEP ? "smallStep" : "smallGain";
       break;
     }
   }
@@ -97,21 +104,47 @@ interface Position {
 
 /** Raises the damping until a step makes the sum smaller; null when none does. */
 function descend(problem: LeastSquaresProblem, from: Position, free: readonly number[]): Position | null {
-  const columns = free.map((unknown) => from.here.columns[unknown] as Float64Array);
-  const norms = columns.map((column) => Math.sqrt(sumOfSquares(column)));
   for (let lambda = from.lambda; lambda < MOST_DAMPING; lambda *= 10) {
-    const damping = norms.map((norm) => Math.sqrt(lambda) * norm);
-    const step = dampedStep(columns, from.here.residuals, damping);
-    const moved = [...from.x];
-    for (const [k, unknown] of free.entries())
-      moved[unknown] = (from.x[unknown] as number) + (step[k] as number);
-    const x = clamp(problem, moved);
+    const x = boundedStep(problem, from, free, lambda);
     const there = problem.evaluate(x);
     if (there === null) continue;
     const cost = sumOfSquares(there.residuals);
     if (cost < from.cost) return { x, here: there, cost, lambda: lambda / 10 };
   }
   return null;
+}
+
+/**
+ * The damped step of the free unknowns. One that would cross its bound goes just as far as the bound, and the
+ * others are solved again with that part of the residuals done, so that they do not answer to a step never taken.
+ */
+function boundedStep(
+  problem: LeastSquaresProblem,
+  { x, here }: Position,
+  free: readonly number[],
+  lambda: number,
+): number[] {
+  const moved = [...x];
+  const residuals = Float64Array.from(here.residuals);
+  let open = free;
+  while (open.length > 0) {
+    const columns = open.map((unknown) => here.columns[unknown] as Float64Array);
+    const damping = columns.map((column) => Math.sqrt(lambda * sumOfSquares(column)));
+    const step = dampedStep(columns, residuals, damping);
+    for (const [k, unknown] of open.entries()) moved[unknown] = (x[unknown] as number) + (step[k] as number);
+    const bounded = clamp(problem, moved);
+    const crossing = open.filter((unknown) => bounded[unknown] !== moved[unknown]);
+    if (crossing.length === 0) break;
+    for (const unknown of crossing) {
+      moved[unknown] = bounded[unknown] as number;
+      const done = (bounded[unknown] as number) - (x[unknown] as number);
+      const column = here.columns[unknown] as Float64Array;
+      for (let i = 0; i < residuals.length; i++)
+        residuals[i] = (residuals[i] as number) + done * (column[i] as number);
+    }
+    open = open.filter((unknown) => !crossing.includes(unknown));
+  }
+  return moved;
 }
 
 function clamp(problem: LeastSquaresProblem, x: readonly number[]): number[] {

@@ -15,6 +15,14 @@ import { bandTravels } from "../bumpSteer.ts";
 import { jointShift, type Move } from "./moves.ts";
 
 /**
+ * The sides whose bump steer is not a copy of the other's: straight ahead a mirrored corner is the left's image,
+ * whatever the steering.
+ */
+function differentSides(axle: Axle): readonly Side[] {
+  return axle.right === "mirror" ? ["left"] : SIDES;
+}
+
+/**
  * Residuals in degrees of toe and their analytic columns, in one order: height, side, travel. Null when a ride
  * height is out of reach. A band that the linkage cannot follow to its end keeps its number of residuals: those
  * beyond the end repeat the last one, so that the sum stays comparable.
@@ -28,7 +36,7 @@ export function bumpSteerResiduals(
   const parts: SidePart[] = [];
   for (const height of heights) {
     const travels = bandTravels(height.band, step);
-    for (const side of SIDES) {
+    for (const side of differentSides(axle)) {
       const part = sidePart(axle, side, moves, height.wheelUp, travels);
       if (part === null) return null;
       parts.push(part);
