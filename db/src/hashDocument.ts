@@ -9,3 +9,8 @@ export function hashDocument(document: unknown): string {
   if (canonical === undefined) throw new Error("only a JSON document has a hash");
   return createHash("sha256").update(canonical).digest("hex");
 }
+
+/** Whether two JSON values are the same, whatever the order of their keys; undefined equals only itself. */
+export function isSameDocument(a: unknown, b: unknown): boolean {
+  return canonicalize(a) === canonicalize(b);
+}

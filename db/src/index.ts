@@ -9,7 +9,7 @@ export {
   type Tx,
   type WorkshopScope,
 } from "./client.ts";
-export { hashDocument } from "./hashDocument.ts";
+export { hashDocument, isSameDocument } from "./hashDocument.ts";
 export { migrateDatabase } from "./migrate.ts";
 export { JOB_SCHEMA, QUEUES, SHEET_RETRIES } from "./queues.ts";
 export * from "./schema/index.ts";

@@ -32,7 +32,7 @@ export type ProblemCode = z.infer<typeof ProblemCode>;
 
 /** kinematics' Issue on the wire. */
 export const ProblemIssue = z.object({
-  path: z.array(z.union([z.string(), z.number()])),
+  path: z.array(z.union([z.string(), z.number()])).readonly(),
   problem: z.string(),
   hint: z.string(),
   value: z.unknown().optional(),

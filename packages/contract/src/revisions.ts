@@ -3,8 +3,7 @@
 import { z } from "zod";
 import { Id, PersonRef, Timestamp, textOf } from "./primitives.ts";
 import { defineRoute, NoBody } from "./route.ts";
-import { StudyParams } from "./studies.ts";
-import { StudySchema } from "./study.ts";
+import { StudyDocument, StudyParams } from "./studies.ts";
 
 export const RevisionStatus = z.enum([
   "saved",
@@ -38,7 +37,7 @@ export type RevisionSummary = z.infer<typeof RevisionSummary>;
 export const RevisionList = z.object({ revisions: z.array(RevisionSummary) });
 export type RevisionList = z.infer<typeof RevisionList>;
 
-export const RevisionAnswer = RevisionSummary.extend({ study: StudySchema });
+export const RevisionAnswer = RevisionSummary.extend({ study: StudyDocument });
 export type RevisionAnswer = z.infer<typeof RevisionAnswer>;
 
 export const SaveRevisionRequest = z.strictObject({

@@ -1,11 +1,15 @@
 // A study: a front axle, a rear axle or a variant, with its working draft.
 
+import type { Study } from "@linkwright/kinematics";
 import { z } from "zod";
 import { BuildParams } from "./builds.ts";
 import { SaveEditsRequest } from "./edits.ts";
 import { Id, Name, PersonRef, Timestamp } from "./primitives.ts";
 import { defineRoute, NoBody } from "./route.ts";
 import { StudySchema } from "./study.ts";
+
+/** The whole study under kinematics' own type, which zod's inference would only approach. */
+export const StudyDocument: z.ZodType<Study, Study> = StudySchema;
 
 export const StudyParams = z.strictObject({ workshopId: Id, studyId: Id });
 
@@ -29,14 +33,14 @@ export type StudySummary = z.infer<typeof StudySummary>;
 export const StudyList = z.object({ studies: z.array(StudySummary) });
 export type StudyList = z.infer<typeof StudyList>;
 
-export const StudyAnswer = StudySummary.extend({ draft: StudySchema });
+export const StudyAnswer = StudySummary.extend({ draft: StudyDocument });
 export type StudyAnswer = z.infer<typeof StudyAnswer>;
 
 export const CreateStudyRequest = z.strictObject({
   id: Id,
   name: Name,
   source: z.discriminatedUnion("type", [
-    z.strictObject({ type: z.literal("document"), study: StudySchema }),
+    z.strictObject({ type: z.literal("document"), study: StudyDocument }),
     /** The draft of another study of the workshop, as it stands. */
     z.strictObject({ type: z.literal("copy"), studyId: Id }),
   ]),
@@ -47,7 +51,7 @@ export const RenameStudyRequest = z.strictObject({ name: Name });
 export type RenameStudyRequest = z.infer<typeof RenameStudyRequest>;
 
 /** The draft as this save left it: other people's edits since the base are in it. */
-export const SavedDraft = z.object({ version: z.int(), draft: StudySchema });
+export const SavedDraft = z.object({ version: z.int(), draft: StudyDocument });
 export type SavedDraft = z.infer<typeof SavedDraft>;
 
 export const studyRoutes = {

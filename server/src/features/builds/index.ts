@@ -1,0 +1,2 @@
+export { buildsRouter } from "./routes.ts";
+export { getBuild } from "./service.ts";

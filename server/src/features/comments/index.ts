@@ -1,0 +1,1 @@
+export { commentsRouter } from "./routes.ts";

@@ -1,0 +1,2 @@
+export { findRevision } from "./repo.ts";
+export { revisionsRouter } from "./routes.ts";

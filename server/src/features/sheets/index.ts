@@ -1,0 +1,2 @@
+export { giveUpSheet, makeSheet } from "./makeSheet.ts";
+export { sheetsRouter } from "./routes.ts";

@@ -1,0 +1,2 @@
+export { findRole, getWorkshopName } from "./repo.ts";
+export { workshopsRouter } from "./routes.ts";

@@ -1,0 +1,1 @@
+export { startWorker, type Worker, type WorkerOptions } from "./startWorker.ts";

@@ -1,0 +1,28 @@
+// Mail is posted into the outbox in the transaction of what it tells of: either both happen or neither.
+
+import { randomUUID } from "node:crypto";
+import { outbox, type Tx } from "@linkwright/db";
+import type { Message } from "./messages.ts";
+
+export interface MailSettings {
+  readonly publicUrl: string;
+  /** As in a mail's head: `Linkwright <mail@example.org>` or the address alone. */
+  readonly from: string;
+}
+
+export async function postMail(tx: Tx, settings: MailSettings, message: Message): Promise<void> {
+  const id = randomUUID();
+  await tx.insert(outbox).values({
+    id,
+    messageId: `<${id}@${mailDomain(settings.from)}>`,
+    toAddress: message.to.email,
+    toName: message.to.name,
+    subject: message.subject,
+    bodyText: message.text,
+    bodyHtml: message.html,
+  });
+}
+
+function mailDomain(from: string): string {
+  return from.replace(/>\s*$/, "").split("@").at(-1) ?? "localhost";
+}
