@@ -6,6 +6,7 @@ import {
   type Authenticator,
   authRouter,
   createAuthenticator,
+  createAuthService,
   signedInPerson,
 } from "./features/auth/index.ts";
 import { buildsRouter } from "./features/builds/index.ts";
@@ -78,7 +79,12 @@ function apiRouter(options: AppOptions, authenticator: Authenticator): Router {
   const serve = createServe({ db, findRole });
   const router = Router();
   router.use(
-    authRouter(serve, { db, authenticator, mail, attempts: createAttempts(pool, attemptLimits) }),
+    authRouter(serve, {
+      auth: createAuthService({ db, mail }),
+      authenticator,
+      attempts: createAttempts(pool, attemptLimits),
+      publicUrl: mail.publicUrl,
+    }),
     workshopsRouter(serve),
     buildsRouter(serve),
     studiesRouter(serve),

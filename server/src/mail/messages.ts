@@ -1,7 +1,7 @@
 // What our mails say, in plain text and in HTML that looks like the product.
 
 import { CAUTIONS } from "@linkwright/contract";
-import type { MailSettings } from "./outbox.ts";
+import type { MailSettings } from "./settings.ts";
 
 export interface Message {
   readonly to: { readonly name: string; readonly email: string };

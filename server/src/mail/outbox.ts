@@ -3,12 +3,7 @@
 import { randomUUID } from "node:crypto";
 import { outbox, type Tx } from "@linkwright/db";
 import type { Message } from "./messages.ts";
-
-export interface MailSettings {
-  readonly publicUrl: string;
-  /** As in a mail's head: `Linkwright <mail@example.org>` or the address alone. */
-  readonly from: string;
-}
+import type { MailSettings } from "./settings.ts";
 
 export async function postMail(tx: Tx, settings: MailSettings, message: Message): Promise<void> {
   const id = randomUUID();

@@ -1,2 +1,3 @@
 export { type Authenticator, createAuthenticator, signedInPerson } from "./passport.ts";
 export { authRouter } from "./routes.ts";
+export { createAuthService } from "./service.ts";

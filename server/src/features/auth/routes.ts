@@ -1,27 +1,25 @@
 import { authRoutes } from "@linkwright/contract";
-import type { Db } from "@linkwright/db";
 import { Router } from "express";
 import type { Attempts } from "../../http/rateLimits.ts";
 import type { Serve } from "../../http/serve.ts";
 import { clearSessionCookie } from "../../http/session.ts";
-import type { MailSettings } from "../../mail/index.ts";
 import { type Authenticator, signIn, signOut } from "./passport.ts";
-import { changeMe, getMe, signUp } from "./service.ts";
+import type { AuthService } from "./service.ts";
 
-export interface AuthOptions {
-  readonly db: Db;
+export interface AuthRouterOptions {
+  readonly auth: AuthService;
   readonly authenticator: Authenticator;
   readonly attempts: Attempts;
-  readonly mail: MailSettings;
+  readonly publicUrl: string;
 }
 
-export function authRouter(serve: Serve, options: AuthOptions): Router {
-  const { db, authenticator, attempts, mail } = options;
+export function authRouter(serve: Serve, options: AuthRouterOptions): Router {
+  const { auth, authenticator, attempts, publicUrl } = options;
   const router = Router();
 
   serve.open(router, authRoutes.signUp, async ({ body, request }) => {
     await attempts.countSignUp(request.ip ?? "", body.email);
-    await signUp(db, mail, body);
+    await auth.signUp(body);
     return { email: body.email };
   });
 
@@ -32,16 +30,16 @@ export function authRouter(serve: Serve, options: AuthOptions): Router {
     request.body = body;
     const personId = await signIn(authenticator, request);
     await attempts.forgiveSignIn(address, body.email);
-    return getMe(db, personId);
+    return auth.getMe(personId);
   });
 
   serve.open(router, authRoutes.signOut, async ({ request, response }) => {
     await signOut(request);
-    clearSessionCookie(response, mail.publicUrl);
+    clearSessionCookie(response, publicUrl);
     return undefined;
   });
 
-  serve.signedIn(router, authRoutes.me, ({ personId }) => getMe(db, personId));
-  serve.signedIn(router, authRoutes.changeMe, ({ personId, body }) => changeMe(db, personId, body));
+  serve.signedIn(router, authRoutes.me, ({ personId }) => auth.getMe(personId));
+  serve.signedIn(router, authRoutes.changeMe, ({ personId, body }) => auth.changeMe(personId, body));
   return router;
 }

@@ -14,11 +14,27 @@ import {
   type PersonRow,
 } from "./repo.ts";
 
+export interface AuthOptions {
+  readonly db: Db;
+  readonly mail: MailSettings;
+}
+
+export type AuthService = ReturnType<typeof createAuthService>;
+
+export function createAuthService(options: AuthOptions) {
+  const { db } = options;
+  return {
+    signUp: (request: SignUpRequest) => signUp(options, request),
+    getMe: (personId: string) => getMe(db, personId),
+    changeMe: (personId: string, change: ChangeMeRequest) => changeMe(db, personId, change),
+  };
+}
+
 /**
  * Makes a person, their workshop and the welcome mail, or nothing. The answer and the time it takes are the same for
  * an address that has an account already: only its owner learns of it, by mail.
  */
-export async function signUp(db: Db, mail: MailSettings, request: SignUpRequest): Promise<void> {
+async function signUp({ db, mail }: AuthOptions, request: SignUpRequest): Promise<void> {
   const passwordHash = await hashPassword(request.password);
   await inWorkshop(db, request.workshopId, async ({ tx }) => {
     if (await addAccount(tx, mail, request, passwordHash)) return;
@@ -62,7 +78,7 @@ export async function verifyCredentials(
   return person && fits ? person.id : null;
 }
 
-export function getMe(db: Db, personId: string): Promise<Me> {
+function getMe(db: Db, personId: string): Promise<Me> {
   return asPerson(db, personId, async (scope) => {
     const person = await findPerson(scope.tx, personId);
     // A session can outlive its person.
@@ -71,7 +87,7 @@ export function getMe(db: Db, personId: string): Promise<Me> {
   });
 }
 
-export async function changeMe(db: Db, personId: string, change: ChangeMeRequest): Promise<Me> {
+async function changeMe(db: Db, personId: string, change: ChangeMeRequest): Promise<Me> {
   if (Object.keys(change).length > 0) {
     await asPerson(db, personId, ({ tx }) => changePerson(tx, personId, change));
   }
