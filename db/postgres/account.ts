@@ -1,5 +1,5 @@
 // The account PostgreSQL runs as. It refuses to run as root, so root hands over to another user.
-import { execFileSync, spawnSync } from "node:child_process";
+import { execFileSync, spawn } from "node:child_process";
 import { chownSync, statSync } from "node:fs";
 import { PostgresProblem } from "./problem.ts";
 
@@ -40,11 +40,27 @@ export function underAccount(account: Account, signal: "INT" | "TERM", command: 
   return ["setpriv", ...change, "--pdeathsig", signal, "--", ...command];
 }
 
-/** Runs a command of the account's to its end. The folder is `/`, as the account need not be able to enter ours. */
-export function runAs(account: Account, command: readonly string[]): { status: number; output: string } {
+/**
+ * Runs a command of the account's to its end, which Ctrl-C at the terminal does not reach. The folder is `/`, as the
+ * account need not be able to enter ours.
+ */
+export function runAs(
+  account: Account,
+  command: readonly string[],
+): Promise<{ status: number; output: string }> {
   const [program, ...args] = underAccount(account, "TERM", command);
-  const result = spawnSync(program as string, args, { cwd: "/", encoding: "utf8", env: serverEnvironment() });
-  return { status: result.status ?? 1, output: `${result.stdout ?? ""}${result.stderr ?? ""}` };
+  return new Promise((resolve, reject) => {
+    const child = spawn(program as string, args, {
+      cwd: "/",
+      env: serverEnvironment(),
+      stdio: ["ignore", "pipe", "pipe"],
+      detached: true,
+    });
+    let output = "";
+    for (const stream of [child.stdout, child.stderr]) stream.on("data", (chunk) => (output += chunk));
+    child.once("error", reject);
+    child.once("close", (code) => resolve({ status: code ?? 1, output }));
+  });
 }
 
 /** Nothing of the caller's environment: PGDATA, PGPORT and their like would be obeyed. */

@@ -1,7 +1,16 @@
 // Makes, starts and stops one cluster. The server is a direct child of this process, never a daemon on its own.
 import { type ChildProcess, spawn } from "node:child_process";
 import { randomBytes } from "node:crypto";
-import { existsSync, mkdirSync, openSync, readFileSync, renameSync, rmSync, writeFileSync } from "node:fs";
+import {
+  closeSync,
+  existsSync,
+  mkdirSync,
+  openSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  writeFileSync,
+} from "node:fs";
 import { createServer } from "node:net";
 import { join } from "node:path";
 import { give, runAs, serverEnvironment, underAccount } from "./account.ts";
@@ -49,7 +58,12 @@ function readPassword(folder: string): string {
 }
 
 /** Made beside its final name and moved there when whole, so that a set-up cut off half way is begun again. */
-function initialise(place: Place, bin: string, options: ClusterOptions, password: string): void {
+async function initialise(
+  place: Place,
+  bin: string,
+  options: ClusterOptions,
+  password: string,
+): Promise<void> {
   const [fresh, passwordFile] = [join(place.folder, "data.new"), join(place.folder, "password.new")];
   rmSync(fresh, { recursive: true, force: true });
   mkdirSync(fresh, { mode: 0o700 });
@@ -57,7 +71,7 @@ function initialise(place: Place, bin: string, options: ClusterOptions, password
   writeFileSync(passwordFile, password, { mode: 0o600 });
   give(passwordFile, place.account);
   const speed = options.durable ? ["--data-checksums"] : ["--no-sync"];
-  const { status, output } = runAs(place.account, [
+  const { status, output } = await runAs(place.account, [
     join(bin, "initdb"),
     ...["-D", fresh, "-U", "postgres", "-E", "UTF8", "--locale=C.UTF-8", "--auth=scram-sha-256"],
     ...[`--pwfile=${passwordFile}`, ...speed],
@@ -99,14 +113,17 @@ function launch(place: Place, bin: string, port: number, options: ClusterOptions
   const command = [join(bin, "postgres"), "-D", join(place.folder, "data")];
   for (const setting of settings) command.push("-c", setting);
   const [program, ...args] = underAccount(place.account, "INT", command);
+  if (existsSync(options.log)) renameSync(options.log, `${options.log}.previous`);
   const log = openSync(options.log, "a", 0o600);
   // A session of its own: Ctrl-C at the terminal must reach the programs that use the database first.
-  return spawn(program as string, args, {
+  const server = spawn(program as string, args, {
     cwd: "/",
     env: serverEnvironment(),
     stdio: ["ignore", log, log],
     detached: true,
   });
+  closeSync(log);
+  return server;
 }
 
 /** The server writes "ready" into its lock file once it takes connections. */
@@ -148,7 +165,7 @@ export async function startCluster(place: Place, options: ClusterOptions): Promi
   const isNew = !existsSync(data);
   const bin = findBinaries(isNew ? null : readFileSync(join(data, "PG_VERSION"), "utf8").trim());
   const password = readPassword(place.folder);
-  if (isNew) initialise(place, bin, options, password);
+  if (isNew) await initialise(place, bin, options, password);
   const recovered = await clearLeftovers(data);
   const port = await findPort(options);
   const server = launch(place, bin, port, options);

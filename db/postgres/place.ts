@@ -14,15 +14,16 @@ import {
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { type Account, accountFor, give, runAs } from "./account.ts";
+import { PostgresProblem } from "./problem.ts";
 
 /** `folder` holds `data` (the cluster's) and the superuser's password, which is for the owner of the checkout alone. */
 export type Place = { readonly folder: string; readonly account: Account };
 
-function canEnter(folder: string, account: Account): boolean {
+async function canEnter(folder: string, account: Account): Promise<boolean> {
   mkdirSync(folder, { recursive: true, mode: 0o755 });
   const trial = mkdtempSync(join(folder, "trial-"));
   give(trial, account);
-  const { status } = runAs(account, ["test", "-w", trial]);
+  const { status } = await runAs(account, ["test", "-w", trial]);
   rmSync(trial, { recursive: true });
   return status === 0;
 }
@@ -34,14 +35,18 @@ function placeOutside(checkout: string): string {
 }
 
 /** The cluster of a checkout: where it already is, or the first place that can be entered. */
-export function choosePlace(checkout: string, wanted: string): Place {
+export async function choosePlace(checkout: string, wanted: string): Promise<Place> {
   const candidates = process.getuid?.() === 0 ? [wanted, placeOutside(checkout)] : [wanted];
   const existing = candidates.find((folder) => existsSync(join(folder, "data/PG_VERSION")));
   if (existing) return { folder: existing, account: accountFor(join(existing, "data")) };
   const account = accountFor(join(wanted, "data"));
-  const folder = candidates.find((candidate) => canEnter(candidate, account)) ?? wanted;
-  if (folder !== wanted) rmSync(wanted, { recursive: true, force: true });
-  return { folder, account };
+  for (const folder of candidates) {
+    if (await canEnter(folder, account)) return { folder, account };
+    rmSync(folder, { recursive: true }); // nothing but an unfinished start can be in it
+  }
+  throw new PostgresProblem(
+    `The user who runs PostgreSQL (${account.uid}) can write in none of ${candidates.join(", ")}: allow it to enter one.`,
+  );
 }
 
 const TEMPORARY = "linkwright-test-";

@@ -11,19 +11,24 @@ import { ensureNpmPackages, findMismatch } from "./npmPackages.mjs";
 import { createSteps, PlainProblem } from "./steps.mjs";
 
 const OLDEST_NODE = [20, 19, 4];
+const SAME_WISH_MS = 1000;
 const root = resolve(dirname(fileURLToPath(import.meta.url)), "../..");
 const dataFolder = join(root, ".data");
 
-/** One signal for the whole run: the first Ctrl-C stops in order, the second leaves the children to the kernel. */
+/**
+ * One signal for the whole run: the first Ctrl-C stops in order, a later one leaves the children to the kernel. npm hands
+ * Ctrl-C on though the terminal has sent it already, so that what follows at once is the same wish and not a second one.
+ */
 function listenForStop() {
   const stop = new AbortController();
+  let patienceUntil = Number.POSITIVE_INFINITY;
   for (const signal of ["SIGINT", "SIGTERM", "SIGHUP"]) {
     process.on(signal, () => {
-      if (stop.signal.aborted) {
-        process.stderr.write("\nStopping at once.\n");
-        process.exit(128 + constants.signals[signal]);
-      }
+      if (!stop.signal.aborted) patienceUntil = performance.now() + SAME_WISH_MS;
       stop.abort(signal);
+      if (performance.now() < patienceUntil) return;
+      process.stderr.write("\nStopping at once.\n");
+      process.exit(128 + constants.signals[signal]);
     });
   }
   return stop.signal;
@@ -71,10 +76,11 @@ async function main() {
     holdLock: (name, explain) => holdLock(join(dataFolder, name), explain),
     readLock: (name) => readLock(join(dataFolder, name)),
   };
-  const context = { root, dataFolder, stop, args, ...createSteps(), ...locks };
+  const context = { root, dataFolder, stop, args, ...createSteps(stop), ...locks };
   try {
     requireNode();
     makeDataFolder();
+    context.say(`Linkwright in ${root}`);
     await makeReady(needs.split(","), context);
     stop.throwIfAborted();
     const { register } = await import("tsx/esm/api");
@@ -82,14 +88,13 @@ async function main() {
     const { run } = await import(pathToFileURL(join(root, program)).href);
     return await run(context);
   } catch (error) {
-    if (stop.aborted) {
-      process.stdout.write("Stopped before everything was up.\n");
-      return 128 + constants.signals[stop.reason];
-    }
+    if (stop.aborted) return 128 + constants.signals[stop.reason];
     process.stderr.write(
       error?.name?.endsWith("Problem") ? `\n${error.message}\n` : `\n${error?.stack ?? error}\n`,
     );
     return 1;
+  } finally {
+    if (stop.aborted) context.say("Stopped.");
   }
 }
 

@@ -5,13 +5,16 @@ import { join } from "node:path";
 
 /**
  * Runs a command to its end. `finish: true` keeps Ctrl-C away from it: a package manager that is cut off half way
- * leaves the machine with half-installed packages. Without it the command is ended when `stop` is raised.
+ * leaves the machine with half-installed packages. Without it the command ends when `stop` is raised or this process dies.
  */
 export function runCommand(command, args, { root, dataFolder, stop, env = {}, finish = false }) {
   const log = join(dataFolder, "logs", "setup.log");
   appendFileSync(log, `\n$ ${command} ${args.join(" ")}\n`);
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, {
+    const [program, ...rest] = finish
+      ? [command, ...args]
+      : ["setpriv", "--pdeathsig", "TERM", "--", command, ...args];
+    const child = spawn(program, rest, {
       cwd: root,
       env: { ...process.env, ...env },
       stdio: ["ignore", "pipe", "pipe"],

@@ -19,7 +19,7 @@ function startBundler(context: Context, held: Held, port: number, apiPort: numbe
     cwd: join(context.root, "app"),
     env: { API_PORT: String(apiPort), EXPO_OFFLINE: "1", EXPO_NO_TELEMETRY: "1", BROWSER: "none" },
     log,
-    echo: "all",
+    echo: "named",
   });
   held.push(bundler.stop);
   return bundler.exited.then((how) => ({ name, how, log }));
@@ -34,7 +34,7 @@ export async function run(context: Context): Promise<number> {
     const publicUrl = `http://localhost:${port}`;
     const settings = {
       folder: context.dataFolder,
-      place: choosePlace(context.root, join(context.dataFolder, "postgres")),
+      place: await choosePlace(context.root, join(context.dataFolder, "postgres")),
       durable: true,
       port: apiPort,
       host: HOST,
@@ -53,6 +53,5 @@ export async function run(context: Context): Promise<number> {
   } finally {
     await held.stopAll();
     lock.release();
-    context.say("Stopped.");
   }
 }

@@ -25,8 +25,8 @@ export type ServiceOptions = {
   readonly cwd: string;
   readonly env: Readonly<Record<string, string | undefined>>;
   readonly log: string;
-  /** Which of its lines also go to the terminal: under its name, or bare when it is the only one that speaks. */
-  readonly echo: "all" | "errors" | "bare" | "none";
+  /** Whether its lines also go to the terminal: under its name, or bare when it is the only one that speaks. */
+  readonly echo: "named" | "bare" | "none";
 };
 
 const STOP_TIMEOUT_MS = 10_000;
@@ -56,15 +56,12 @@ export function startService(options: ServiceOptions): Service {
   );
   const pid = child.pid;
   if (pid === undefined) throw new PlainProblem("`setpriv` is missing: apt-get install -y util-linux");
-  const keep = (line: string, isError: boolean) => {
+  const keep = (line: string) => {
     log.write(`${line}\n`);
-    if (options.echo === "bare") process.stdout.write(`${line}\n`);
-    else if (options.echo === "all" || (options.echo === "errors" && isError)) {
-      process.stdout.write(`${options.name} | ${line}\n`);
-    }
+    if (options.echo !== "none")
+      process.stdout.write(options.echo === "named" ? `${options.name} | ${line}\n` : `${line}\n`);
   };
-  if (child.stdout) createInterface(child.stdout).on("line", (line) => keep(line, false));
-  if (child.stderr) createInterface(child.stderr).on("line", (line) => keep(line, true));
+  for (const stream of [child.stdout, child.stderr]) if (stream) createInterface(stream).on("line", keep);
   let ended = false;
   const exited = new Promise<string>((resolve) => {
     child.once("exit", () => {
@@ -85,7 +82,7 @@ export function startService(options: ServiceOptions): Service {
   return { name: options.name, pid, log: options.log, exited, hasExited: () => ended, message, stop };
 }
 
-export function endOfLog(log: string, count = 12): string {
+export function endOfLog(log: string, count = 20): string {
   const text = existsSync(log) ? readFileSync(log, "utf8").trimEnd() : "";
   return text.split("\n").slice(-count).join("\n");
 }

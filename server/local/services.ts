@@ -74,12 +74,12 @@ async function startDatabase(settings: Settings, context: Context, held: Held) {
 async function startFakes(settings: Settings, context: Context, held: Held) {
   const pagePort = await freePort(settings.port + 1);
   const service = startService({
-    name: "mail and file storage",
+    name: "mail and file server",
     args: ["--import", "tsx", join(context.root, "server/local/fakes.ts")],
     cwd: context.root,
     env: { FAKES_FOLDER: settings.folder, S3_BUCKET: BUCKET, MAIL_PAGE_PORT: String(pagePort) },
     log: logOf(settings, "fakes"),
-    echo: "errors",
+    echo: "none",
   });
   held.push(service.stop);
   const ports = (await whileRunning(service, context.stop, service.message)) as FakesReady;
@@ -159,7 +159,7 @@ async function startPrograms(
       cwd: context.root,
       env,
       log: logOf(settings, log),
-      echo: settings.watch ? "all" : "errors",
+      echo: settings.watch ? "named" : "none",
     });
     held.push(service.stop);
     return service;

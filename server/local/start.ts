@@ -69,13 +69,12 @@ export async function run(context: Context): Promise<number> {
   const held = createHeld();
   try {
     const port = await choosePort("PORT", DEFAULT_PORT, host, "npm start");
-    context.say(`Linkwright starts from ${context.root}`);
     if (lock.stale)
       context.say("  The last start was not stopped in order; its stale lock file was cleared.");
     const web = await context.step("Building the web client", () => buildWeb(context));
     const settings: Settings = {
       folder: context.dataFolder,
-      place: choosePlace(context.root, join(context.dataFolder, "postgres")),
+      place: await choosePlace(context.root, join(context.dataFolder, "postgres")),
       durable: true,
       port,
       host,
@@ -99,6 +98,5 @@ export async function run(context: Context): Promise<number> {
   } finally {
     await held.stopAll();
     lock.release();
-    context.say("Stopped.");
   }
 }

@@ -9,7 +9,7 @@ export function seconds(milliseconds) {
   return `${(milliseconds / 1000).toFixed(1)} s`;
 }
 
-export function createSteps(write = (text) => process.stdout.write(text)) {
+export function createSteps(stop, write = (text) => process.stdout.write(text)) {
   return {
     say: (line) => write(`${line}\n`),
     /** Runs `work` under a line of its own; what `work` returns under `note` stands at the end of that line. */
@@ -22,7 +22,7 @@ export function createSteps(write = (text) => process.stdout.write(text)) {
         write(`${note}${seconds(performance.now() - from)}\n`);
         return result;
       } catch (error) {
-        write(`failed after ${seconds(performance.now() - from)}\n`);
+        write(`${stop.aborted ? "stopped" : "failed"} after ${seconds(performance.now() - from)}\n`);
         throw error;
       }
     },
