@@ -29,7 +29,8 @@ export type ServiceOptions = {
   readonly echo: "named" | "bare" | "none";
 };
 
-const STOP_TIMEOUT_MS = 10_000;
+const STOP_TIMEOUT_MS = 40_000; // the job worker lets the job it is at come to its end
+const PATIENCE_MS = 3_000;
 
 /** Ends what the program itself has started and left. Its group is its own, so nobody else is in it. */
 function killGroup(pid: number): void {
@@ -74,8 +75,12 @@ export function startService(options: ServiceOptions): Service {
   });
   const stop = async () => {
     if (!ended) child.kill("SIGTERM");
+    const tell = setTimeout(() => {
+      process.stdout.write(`Waiting for the ${options.name} to finish; Ctrl-C stops at once.\n`);
+    }, PATIENCE_MS);
     const hurry = setTimeout(() => killGroup(pid), STOP_TIMEOUT_MS);
     await exited;
+    clearTimeout(tell);
     clearTimeout(hurry);
   };
   const message = new Promise<unknown>((resolve) => child.once("message", resolve));
