@@ -47,7 +47,9 @@ function findDifferences(
     return [{ where, line: `has ${(actual as unknown[]).length} entries, expected ${expected.length}` }];
   }
   return Object.entries(expected).flatMap(([key, value]) => {
-    const step = Array.isArray(expected) ? `[${key}]` : `${where === "" ? "" : "."}${key}`;
+    const step = Array.isArray(expected)
+      ? `[${key}]`
+      : `${where === "" || where.endsWith(" ") ? "" : "."}${key}`;
     return findDifferences((actual as Record<string, unknown>)[key], value, tolerance, `${where}${step}`);
   });
 }
