@@ -1,13 +1,8 @@
 // What the bootstrap hands to the program it starts, and the error whose message alone is shown.
 
-export type LockHolder = { readonly pid: number; readonly url?: string; readonly webFolder?: string };
+import type { HeldLock, LockHolder } from "./lock.mjs";
 
-export type HeldLock = {
-  /** Whether a dead holder's file was cleared away. */
-  readonly stale: boolean;
-  describe(facts: Omit<LockHolder, "pid">): void;
-  release(): void;
-};
+export type { HeldLock, LockHolder };
 
 export type Context = {
   readonly root: string;

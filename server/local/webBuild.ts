@@ -72,7 +72,7 @@ async function exportTo(folder: string, context: Context): Promise<void> {
 
 /** The folder of the web client as the sources are; built when there is none yet. A running server keeps its own. */
 export async function buildWeb(context: Context): Promise<{ folder: string; note: string }> {
-  const builds = join(context.dataFolder, "web");
+  const builds = join(context.root, "app/dist");
   mkdirSync(builds, { recursive: true });
   const folder = join(builds, hashSources(context.root));
   removeOthers(builds, [folder, context.readLock("running.json")?.webFolder]);

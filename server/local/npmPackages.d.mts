@@ -1,0 +1,1 @@
+export function findMismatch(root: string): string | null;
