@@ -1,3 +1,4 @@
+export type { Study } from "@linkwright/kinematics";
 export * from "./auth.ts";
 export { AxleSchema } from "./axle.ts";
 export * from "./builds.ts";
