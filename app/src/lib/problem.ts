@@ -47,31 +47,22 @@ export function isPassing(error: unknown): boolean {
 export interface Explanation {
   readonly title: string;
   readonly detail: string;
-  /** What the person can do. */
-  readonly advice: string;
+  /** What the person can do, where the detail does not say it already. */
+  readonly advice: string | undefined;
   /** To be told when asking for help. */
   readonly reference: string | undefined;
 }
 
-const ADVICE: Record<ProblemKind, string> = {
-  invalid: "Mend what is named and send it again.",
-  study_refused: "Put the last change back, or mend what is named.",
-  not_signed_in: "Sign in again. What you typed is kept.",
-  wrong_credentials: "Check the e-mail address and the password.",
-  not_allowed: "Ask the owner of the workshop for the right to do this.",
-  foreign_request: "Load this page anew and try again.",
+/** The server's own details end in what to do; only what this side knows better is added. */
+const ADVICE: Partial<Record<ProblemKind, string>> = {
+  not_signed_in: "What you typed is kept.",
   not_found: "Check the address, or go back to the builds.",
-  edit_conflict: "Choose which value stands.",
-  draft_moved: "Look at the newer draft, then do it again.",
   id_reused: "Load this page anew and try again.",
-  sheet_not_ready: "Wait until it is made, then fetch it.",
-  too_large: "Send less at once.",
-  too_many_attempts: "Wait a little, then try again.",
-  unavailable: "Try again in a moment. What you typed is kept.",
-  internal: "Try again. If it stays, tell whoever runs this server the reference.",
+  unavailable: "What you typed is kept.",
+  internal: "If it stays, tell whoever runs this server the reference.",
   offline: "What you typed is kept on this device. Try again once there is a connection.",
-  timeout: "Try again. What you typed is kept.",
-  unreachable: "Try again in a moment. What you typed is kept.",
+  timeout: "What you typed is kept. Try again.",
+  unreachable: "What you typed is kept. Try again in a moment.",
   unexpected_answer: "Load this page anew: a newer version may have come out.",
 };
 

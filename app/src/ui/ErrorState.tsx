@@ -29,7 +29,7 @@ export function ErrorState({ title, error, onRetry, actions }: ErrorStateProps) 
     >
       <Text>{detail}</Text>
       <IssueList error={error} />
-      <Text>{advice}</Text>
+      {advice ? <Text>{advice}</Text> : null}
       {reference ? (
         <Text variant="figureSmall" tone="inkSoft">
           {`Reference ${reference}`}

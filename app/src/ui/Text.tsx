@@ -1,7 +1,8 @@
-import { Text as NativeText, type TextProps as NativeTextProps } from "react-native";
+import type { ComponentProps } from "react";
+import { Text as NativeText } from "react-native";
 import { type ColorName, color, type TypeName, type } from "./theme/tokens.ts";
 
-export interface TextProps extends NativeTextProps {
+export interface TextProps extends ComponentProps<typeof NativeText> {
   readonly variant?: TypeName;
   readonly tone?: ColorName;
 }

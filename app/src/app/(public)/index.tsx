@@ -1,0 +1,5 @@
+import { LandingScreen } from "@/features/landing/index.ts";
+
+export default function LandingRoute() {
+  return <LandingScreen />;
+}

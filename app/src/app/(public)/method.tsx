@@ -1,0 +1,5 @@
+import { MethodScreen } from "@/features/method/index.ts";
+
+export default function MethodRoute() {
+  return <MethodScreen />;
+}

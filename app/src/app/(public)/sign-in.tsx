@@ -1,0 +1,5 @@
+import { SignInScreen } from "@/features/auth/index.ts";
+
+export default function SignInRoute() {
+  return <SignInScreen />;
+}

@@ -1,0 +1,5 @@
+import { SignUpScreen } from "@/features/auth/index.ts";
+
+export default function SignUpRoute() {
+  return <SignUpScreen />;
+}

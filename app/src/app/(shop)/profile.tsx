@@ -1,0 +1,5 @@
+import { ProfileScreen } from "@/features/profile/index.ts";
+
+export default function ProfileRoute() {
+  return <ProfileScreen />;
+}

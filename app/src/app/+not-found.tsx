@@ -1,0 +1,5 @@
+import { NotFoundScreen } from "@/features/frame/index.ts";
+
+export default function NotFoundRoute() {
+  return <NotFoundScreen />;
+}

@@ -1,0 +1,2 @@
+export { SignInScreen } from "./SignInScreen.tsx";
+export { SignUpScreen } from "./SignUpScreen.tsx";

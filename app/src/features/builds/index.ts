@@ -1,0 +1,2 @@
+export { BuildScreen } from "./BuildScreen.tsx";
+export { BuildsScreen } from "./BuildsScreen.tsx";

@@ -1,0 +1,1 @@
+export { CautionList } from "./CautionList.tsx";

@@ -1,0 +1,4 @@
+export { NotFoundScreen } from "./NotFoundScreen.tsx";
+export { PersonMenu } from "./PersonMenu.tsx";
+export { PublicFrame } from "./PublicFrame.tsx";
+export { ShopFrame } from "./ShopFrame.tsx";

@@ -1,0 +1,1 @@
+export { LandingScreen } from "./LandingScreen.tsx";

@@ -1,0 +1,1 @@
+export { ProfileScreen } from "./ProfileScreen.tsx";
