@@ -119,7 +119,8 @@ function reportReach(fault: OutOfReach, context: ReportContext): FaultReport {
       title: `${capitalise(side)} wheel cannot be brought to the ride height ${place.height}`,
       where: null,
       meaning: `${runsOut} on the way there.`,
-      advice: "Choose a ride height nearer to the drawn one, or move the points so that the linkage reaches it.",
+      advice:
+        "Choose a ride height nearer to the drawn one, or move the points so that the linkage reaches it.",
       place: null,
     };
   }
@@ -140,13 +141,17 @@ function reportReach(fault: OutOfReach, context: ReportContext): FaultReport {
     title: `${capitalise(side)} wheel comes to its end at ${reach} in ${way}`,
     where: placeInWords(place, context),
     meaning: `${runsOut} inside the travel that was asked for: the linkage locks solid there.`,
-    advice: "Shorten the ride height's band or the rack's travel, or move the points so that it reaches further.",
+    advice:
+      "Shorten the ride height's band or the rack's travel, or move the points so that it reaches further.",
     place,
   };
 }
 
 /** A ride height that is not reached ends on its way there, which alone looks like an end in droop or bump. */
-function wayLost({ side, lastTravel, wheelUp }: OutOfReach, axle: Axle): "height" | "lock" | "bump" | "droop" {
+function wayLost(
+  { side, lastTravel, wheelUp }: OutOfReach,
+  axle: Axle,
+): "height" | "lock" | "bump" | "droop" {
   if (lastTravel === null) return "lock";
   const travel = { left: wheelUp, right: wheelUp };
   if (poseAxle(axle, { travel, steer: 0, wheelUp })[side] === null) return "height";

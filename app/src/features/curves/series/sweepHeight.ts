@@ -30,7 +30,12 @@ export interface HeightSweep {
 const POINTS = 32;
 
 /** Call it with an axle that checkAxle accepts. */
-export function sweepHeight(axle: Axle, height: RideHeight, { from, to }: TravelRange, steer = 0): HeightSweep {
+export function sweepHeight(
+  axle: Axle,
+  height: RideHeight,
+  { from, to }: TravelRange,
+  steer = 0,
+): HeightSweep {
   const travels = bandTravels([from, to], (to - from) / POINTS);
   const { wheelUp } = height;
   const absolute = travels.map((travel) => wheelUp + travel);

@@ -23,7 +23,11 @@ interface ToeStyle {
 }
 
 /** What toeShown answered, as text. */
-export function formatToe(shown: number | null, display: ToeDisplay, { units, decimals, sign }: ToeStyle): string {
+export function formatToe(
+  shown: number | null,
+  display: ToeDisplay,
+  { units, decimals, sign }: ToeStyle,
+): string {
   const style = sign ? { sign } : {};
   if (display.as === "degrees") return formatAngle(shown, { decimals: decimals ?? 2, ...style });
   return formatLength(shown, units, { decimals: lengthDecimals(units), ...style });

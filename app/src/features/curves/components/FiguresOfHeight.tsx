@@ -1,0 +1,89 @@
+import { StyleSheet, View } from "react-native";
+import { formatAngle, formatAngleGradient } from "@/lib/format.ts";
+import { HiddenText } from "@/ui/HiddenText.tsx";
+import { Figure, Text } from "@/ui/Text.tsx";
+import { color, space } from "@/ui/theme/tokens.ts";
+import type { HeightFigures } from "../series/figures.ts";
+import type { Reading } from "../series/panels.ts";
+import { formatToe, toeShown } from "../series/toeDisplay.ts";
+import { VerdictText } from "./VerdictText.tsx";
+
+interface FiguresOfHeightProps {
+  readonly figures: HeightFigures;
+  /** What they were before; struck through where they differ as shown. */
+  readonly before?: HeightFigures | null;
+  readonly reading: Reading;
+  readonly isChosen?: boolean;
+}
+
+/** Bump steer of one ride height in figures: how far it swings, its worst, its slope, and whether that will do. */
+export function FiguresOfHeight({ figures, before, reading, isChosen }: FiguresOfHeightProps) {
+  const { height, judgement } = figures;
+  const { units, toe } = reading;
+  const angle = (deg: number | null) =>
+    deg === null || toe.as === "degrees"
+      ? formatAngle(deg, { decimals: 3 })
+      : formatToe(toeShown(deg, toe), toe, { units });
+  const gradient = (rate: number | null) => formatAngleGradient(rate, units, "always");
+  return (
+    <View role="group" aria-label={`Bump steer at ${height.name}`} style={styles.group}>
+      <Text variant="strong" tone={isChosen ? "dye" : "ink"} style={styles.name}>
+        {height.name}
+      </Text>
+      <View style={styles.figures}>
+        <Item
+          label="Peak to peak"
+          now={angle(figures.peakToPeakDeg)}
+          before={before && angle(before.peakToPeakDeg)}
+        />
+        <Item label="Worst in band" now={angle(figures.worstDeg)} before={before && angle(before.worstDeg)} />
+        <Item
+          label={`Slope, ${wayOf(figures.gradientDegPerMm)}`}
+          now={gradient(figures.gradientDegPerMm)}
+          before={before && gradient(before.gradientDegPerMm)}
+        />
+        {judgement ? (
+          <View style={styles.item}>
+            <Text variant="label" tone="inkSoft">
+              Target
+            </Text>
+            <VerdictText judgement={judgement} units={units} />
+          </View>
+        ) : null}
+      </View>
+    </View>
+  );
+}
+
+function wayOf(gradient: number | null): string {
+  if (gradient === null || gradient === 0) return "none";
+  return gradient > 0 ? "toe-in in bump" : "toe-out in bump";
+}
+
+function Item({ label, now, before }: { label: string; now: string; before: string | null | undefined }) {
+  return (
+    <View style={styles.item}>
+      <Text variant="label" tone="inkSoft">
+        {label}
+      </Text>
+      <View style={styles.values}>
+        {before && before !== now ? (
+          <Figure variant="figureSmall" tone="inkSoft" style={styles.struck}>
+            <HiddenText>{"before "}</HiddenText>
+            {before}
+          </Figure>
+        ) : null}
+        <Figure>{now}</Figure>
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  group: { gap: space.xs, paddingVertical: space.s, borderTopWidth: 1, borderTopColor: color.rule },
+  name: {},
+  figures: { flexDirection: "row", flexWrap: "wrap", columnGap: space.xl, rowGap: space.s },
+  item: { gap: space.hair, minWidth: 100 },
+  values: { flexDirection: "row", alignItems: "baseline", gap: space.s, flexWrap: "wrap" },
+  struck: { textDecorationLine: "line-through" },
+});

@@ -1,0 +1,82 @@
+import type { LengthUnit } from "@linkwright/contract";
+import type { Axle, RideHeight, Target } from "@linkwright/kinematics";
+import { memo, useMemo } from "react";
+import { StyleSheet, View } from "react-native";
+import type { DialectWord } from "@/lib/dialect.ts";
+import { Figure, Text } from "@/ui/Text.tsx";
+import { type ColorName, color, space } from "@/ui/theme/tokens.ts";
+import { useIsWide } from "@/ui/useMediaQuery.ts";
+import { type Judgement, judgeTargets, type Verdict } from "../targets/judge.ts";
+import { formatQuantity, quantityName } from "../targets/targetWords.ts";
+import { VerdictText } from "./VerdictText.tsx";
+
+interface TargetStripProps {
+  readonly axle: Axle;
+  readonly heights: readonly RideHeight[];
+  readonly targets: readonly Target[];
+  readonly units: LengthUnit;
+  readonly words: Readonly<Record<DialectWord, string>>;
+}
+
+const BAR: Readonly<Record<Verdict, ColorName>> = {
+  inside: "chromate",
+  below: "fault",
+  above: "fault",
+  unknown: "amber",
+};
+
+/** Every target with its worst value of all ride heights. Nothing where there are no targets. */
+export const TargetStrip = memo(function TargetStrip(props: TargetStripProps) {
+  const { axle, heights, targets, units, words } = props;
+  const isWide = useIsWide();
+  const judgements = useMemo(() => judgeTargets(axle, heights, targets), [axle, heights, targets]);
+  if (judgements.length === 0) return null;
+  return (
+    <View role="list" aria-label="Targets" style={[styles.strip, isWide ? styles.wide : styles.stacked]}>
+      {judgements.map((judgement) => (
+        <View
+          role="listitem"
+          key={judgement.target.quantity}
+          style={[styles.tile, isWide && styles.wideTile, { borderTopColor: color[BAR[judgement.verdict]] }]}
+        >
+          <Text variant="label" tone="inkSoft">
+            {quantityName(judgement.target.quantity, words)}
+          </Text>
+          <Figure>{formatQuantity(judgement.target.quantity, judgement.value, units)}</Figure>
+          <VerdictText judgement={judgement} units={units} />
+          <Text variant="small" tone="inkSoft">
+            {whereOf(judgement, heights.length)}
+          </Text>
+        </View>
+      ))}
+    </View>
+  );
+});
+
+function whereOf({ height, side }: Judgement, count: number): string {
+  const where = count > 1 ? [`worst at ${height}`] : [height];
+  return side === null ? where.join("") : [...where, side].join(", ");
+}
+
+const styles = StyleSheet.create({
+  strip: { backgroundColor: color.panel },
+  wide: {
+    flexDirection: "row",
+    borderTopWidth: 1,
+    borderTopColor: color.rule,
+    overflowX: "auto",
+    flexShrink: 0,
+  } as object,
+  stacked: { flexDirection: "row", flexWrap: "wrap" },
+  tile: {
+    gap: space.hair,
+    borderTopWidth: 3,
+    paddingHorizontal: space.m,
+    paddingVertical: space.s,
+    flexGrow: 1,
+    flexBasis: 160,
+    borderRightWidth: 1,
+    borderRightColor: color.rule,
+  },
+  wideTile: { minWidth: 170, maxWidth: 300 },
+});
