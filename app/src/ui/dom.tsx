@@ -79,3 +79,7 @@ export function DomTableHeadCell(props: DomProps<"th">) {
 export function DomTableCell(props: DomProps<"td">) {
   return unstable_createElement("td", withClass(props));
 }
+
+export function DomAnchor(props: DomProps<"a">) {
+  return unstable_createElement("a", withClass(props));
+}

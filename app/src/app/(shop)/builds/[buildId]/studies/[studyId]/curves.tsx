@@ -1,0 +1,5 @@
+import { CurvesScreen } from "@/features/curves/index.ts";
+
+export default function CurvesRoute() {
+  return <CurvesScreen />;
+}
