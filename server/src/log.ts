@@ -1,5 +1,7 @@
 // One line of JSON for each thing worth telling. Handed in wherever it is needed, so that tests can listen or be quiet.
 
+import { DrizzleQueryError } from "drizzle-orm/errors";
+
 export type LogFields = Readonly<Record<string, unknown>>;
 
 export interface Log {
@@ -21,5 +23,7 @@ export const quietLog: Log = { info: () => {}, error: () => {} };
 export function describeError(error: unknown): LogFields {
   if (!(error instanceof Error)) return { error: String(error) };
   const cause = error.cause === undefined ? {} : { cause: describeError(error.cause) };
+  // Its message and its stack repeat the parameters: passwords' hashes, addresses, whole studies.
+  if (error instanceof DrizzleQueryError) return { error: "query failed", query: error.query, ...cause };
   return { error: error.message, stack: error.stack, ...cause };
 }
