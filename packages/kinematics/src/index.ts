@@ -14,6 +14,15 @@ export { steeringLock, steeringUnit } from "./model/steering/index.ts";
 export type * from "./model/study.ts";
 export { STUDY_FORMAT, TARGET_QUANTITIES } from "./model/study.ts";
 export { checkAxle, checkStudy } from "./pose/checkAxle.ts";
+export {
+  type CornerSolver,
+  type CornerSolverOutcome,
+  poseAt,
+  prepareCorner,
+  steerTo,
+  type TravelColumn,
+  travelColumn,
+} from "./pose/cornerSolver.ts";
 export { type AxleInputs, type CornerPlacement, poseAxle } from "./pose/poseAxle.ts";
 export {
   type Band,

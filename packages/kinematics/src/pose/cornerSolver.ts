@@ -182,36 +182,91 @@ export interface TravelColumn {
  * Call steerTo first. The system is left somewhere on the way.
  */
 export function travelColumn(solver: CornerSolver, travels: readonly number[]): TravelColumn {
-  const { system, wheelUp } = solver;
+  const { wheelUp } = solver;
   const poses = new Float64Array(travels.length * POSE_NUMBERS);
   const reached = new Uint8Array(travels.length);
   const ends: { lastTravel: number; link: string }[] = [];
-  const origin = Float64Array.from(system.pose);
-  for (const way of [1, -1] as const) {
-    const order = travels
-      .map((travel, index) => ({ travel, index }))
-      .filter(({ travel }) => (way === 1 ? travel >= wheelUp : travel < wheelUp))
-      .sort((a, b) => way * (a.travel - b.travel));
-    if (order.length === 0) continue;
-    const height = solver.design.p_K_wheelCentre[2];
-    const values = Float64Array.from([wheelUp, ...order.map(({ travel }) => travel)], (z) => height + z);
-    const column = new Float64Array(values.length * POSE_NUMBERS);
-    const limit = new Float64Array(1);
-    system.pose.set(origin);
-    setValue(system, solver.wheelHeight, height + wheelUp);
-    const solved = followColumn(system, solver.wheelHeight, values, column, solver.branch, limit);
-    for (const [place, { index }] of order.entries()) {
-      if (place + 1 >= solved) break;
-      const from = (place + 1) * POSE_NUMBERS;
-      poses.set(column.subarray(from, from + POSE_NUMBERS), index * POSE_NUMBERS);
+  const order = ascending(travels);
+  const split = order.findIndex((index) => (travels[index] as number) >= wheelUp);
+  const first = split < 0 ? order.length : split;
+  const origin = Float64Array.from(solver.system.pose);
+  let known: KnownPoses = { values: [wheelUp], poses: origin };
+  for (const way of [order.slice(first), order.slice(0, first).reverse()]) {
+    if (way.length === 0) continue;
+    const values = way.map((index) => travels[index] as number);
+    const column = oneWay(solver, known, values);
+    for (const [place, index] of way.entries()) {
+      if (place >= column.solved) break;
+      const from = (known.values.length + place) * POSE_NUMBERS;
+      for (let k = 0; k < POSE_NUMBERS; k++) {
+        poses[index * POSE_NUMBERS + k] = column.poses[from + k] as number;
+      }
       reached[index] = 1;
     }
-    if (solved < values.length) {
-      const lastTravel = (limit[0] as number) - height;
-      ends.push({ lastTravel, link: rowThatRanOut(system, [WHEEL_HEIGHT]) });
-    }
+    if (column.end !== null) ends.push(column.end);
+    known = lookingBack(wheelUp, values, column, known.values.length);
   }
   return { travels, poses, reached, ends };
+}
+
+interface KnownPoses {
+  readonly values: number[];
+  readonly poses: Float64Array;
+}
+
+interface OneWay {
+  /** The known poses, then the new ones. */
+  readonly poses: Float64Array;
+  /** How many of the new travels were reached. */
+  readonly solved: number;
+  readonly end: { lastTravel: number; link: string } | null;
+}
+
+/** Follows travels away from the last of the known poses, where the system is put first. */
+function oneWay(solver: CornerSolver, known: KnownPoses, travels: readonly number[]): OneWay {
+  const { system, wheelHeight } = solver;
+  const height = solver.design.p_K_wheelCentre[2];
+  const count = known.values.length;
+  const values = new Float64Array(count + travels.length);
+  for (let i = 0; i < values.length; i++) {
+    values[i] = height + ((i < count ? known.values[i] : travels[i - count]) as number);
+  }
+  const poses = new Float64Array(values.length * POSE_NUMBERS);
+  poses.set(known.poses);
+  for (let k = 0; k < POSE_NUMBERS; k++) {
+    system.pose[k] = poses[(count - 1) * POSE_NUMBERS + k] as number;
+  }
+  setValue(system, wheelHeight, values[count - 1] as number);
+  const limit = new Float64Array(1);
+  const solved = followColumn(system, wheelHeight, values, poses, count, solver.branch, limit);
+  const end =
+    solved === values.length
+      ? null
+      : { lastTravel: (limit[0] as number) - height, link: rowThatRanOut(system, [WHEEL_HEIGHT]) };
+  return { poses, solved: solved - count, end };
+}
+
+/**
+ * The first poses of the way up, in the order in which the way down comes to them: with them behind it, the way
+ * down is predicted from its first step. `origin` stands at the ride height.
+ */
+function lookingBack(wheelUp: number, values: readonly number[], up: OneWay, before: number): KnownPoses {
+  const distinct = values[0] === wheelUp ? 1 : 0;
+  const back = Math.max(0, Math.min(3, up.solved - distinct));
+  const known: KnownPoses = { values: [], poses: new Float64Array((back + 1) * POSE_NUMBERS) };
+  for (let k = back; k >= 0; k--) {
+    known.values.push(k === 0 ? wheelUp : (values[k - 1 + distinct] as number));
+    const from = (k === 0 ? before - 1 : before + k - 1 + distinct) * POSE_NUMBERS;
+    known.poses.set(up.poses.subarray(from, from + POSE_NUMBERS), (back - k) * POSE_NUMBERS);
+  }
+  return known;
+}
+
+/** Places of `travels` from the lowest travel to the highest. */
+function ascending(travels: readonly number[]): number[] {
+  const order = travels.map((_, index) => index);
+  const isSorted = travels.every((travel, index) => index === 0 || travel >= (travels[index - 1] as number));
+  return isSorted ? order : order.sort((a, b) => (travels[a] as number) - (travels[b] as number));
 }
 
 /** The pose that starts at `index` × 7 of a column. */

@@ -2,7 +2,7 @@
 // where the linkage turns quickly, and never across a position in which the Jacobian changes sign.
 
 import { EQUATIONS, type PoseSystem, STRIDE } from "./constraints.ts";
-import { eliminate, evaluate, solvePose } from "./newton.ts";
+import { CLOSURE, eliminate, evaluate, solvePose } from "./newton.ts";
 
 /** mm of input. A path that cannot go on is narrowed down to this; larger blurs the last good travel. */
 const FINEST_STEP = 1e-9;
@@ -59,74 +59,102 @@ export function branchOf(system: PoseSystem): number {
 }
 
 /**
- * Solves a column of poses over the values of one drive, the hot path of every sweep: `values[0]` is where the
- * system stands assembled, `poses` takes 7 numbers a value (qw qx qy qz tx ty tz). Returns how many values were
- * reached; when fewer than all, `limit[0]` is the last value that could be.
+ * Solves a column of poses over the values of one drive, the hot path of every sweep: `poses` takes 7 numbers a
+ * value (qw qx qy qz tx ty tz), and the first `known` of them are solved already; the system stands at the last of
+ * those. Returns how many values were reached; when fewer than all, `limit[0]` is the last value that could be.
  *
- * Evenly spaced values are predicted by the cubic through the four poses before (error of the order step⁴), so
- * that one elimination usually closes a pose; everything else goes the careful way of `follow`.
+ * Evenly spaced values are predicted by the polynomial through up to four poses before (error of the order of
+ * step⁴), so that one elimination usually closes a pose; what does not close so goes the careful way of `follow`.
  */
 export function followColumn(
   system: PoseSystem,
   drive: number,
   values: Float64Array,
   poses: Float64Array,
+  known: number,
   branch: number,
   limit: Float64Array,
 ): number {
-  const { pose, table } = system;
+  const { pose, table, report } = system;
   const slot = drive * STRIDE + 9;
-  poses.set(pose, 0);
-  for (let i = 1; i < values.length; i++) {
+  for (let i = known; i < values.length; i++) {
     const value = values[i] as number;
-    const before = values[i - 1] as number;
+    const step = Math.abs(value - (values[i - 1] as number));
     table[slot] = value;
-    if (predict(poses, i, values, pose)) {
-      // A prediction off by more than a tenth of the step has missed a bend: go carefully.
-      if (solvePose(system, 0.1 * Math.abs(value - before)) >= 0 && signOfReport(system) === branch) {
-        poses.set(pose, i * POSE);
-        continue;
+    const order = predict(poses, i, values, pose);
+    // A prediction off by more than a tenth of the step has missed a bend: go carefully.
+    const startLimit = CLOSURE + (order === 1 ? Math.min(step, LONGEST_STEP) : 0.1 * step);
+    // The last elimination stood one Newton step short of the pose: near enough for the determinant's sign.
+    if (!(solvePose(system, startLimit) >= 0 && Math.sign(report[0] as number) === branch)) {
+      const reached = followStep(system, slot, values, poses, i, branch);
+      if (reached !== value) {
+        limit[0] = reached;
+        return i;
       }
     }
-    for (let k = 0; k < POSE; k++) pose[k] = poses[(i - 1) * POSE + k] as number;
-    const path: InputPath = {
-      length: Math.abs(value - before),
-      place: (fraction) => {
-        table[slot] = fraction === 1 ? value : before + (value - before) * fraction;
-      },
-    };
-    const outcome = follow(system, path, branch);
-    if (outcome.status === "stopped") {
-      limit[0] = before + (value - before) * outcome.fraction;
-      return i;
-    }
-    poses.set(pose, i * POSE);
+    for (let k = 0; k < POSE; k++) poses[i * POSE + k] = pose[k] as number;
   }
   limit[0] = values[values.length - 1] as number;
   return values.length;
 }
 
-/** The sign of the last elimination's determinant, one Newton step short of the pose: free, and enough here. */
-function signOfReport(system: PoseSystem): number {
-  return Math.sign(system.report[0] as number);
+/** Carries the system from the pose of value i − 1 to value i; returns the value it got to. */
+function followStep(
+  system: PoseSystem,
+  slot: number,
+  values: Float64Array,
+  poses: Float64Array,
+  i: number,
+  branch: number,
+): number {
+  const { pose, table } = system;
+  const value = values[i] as number;
+  const before = values[i - 1] as number;
+  for (let k = 0; k < POSE; k++) pose[k] = poses[(i - 1) * POSE + k] as number;
+  const valueAt = (fraction: number) => (fraction === 1 ? value : before + (value - before) * fraction);
+  const path: InputPath = {
+    length: Math.abs(value - before),
+    place: (fraction) => {
+      table[slot] = valueAt(fraction);
+    },
+  };
+  const outcome = follow(system, path, branch);
+  return valueAt(outcome.status === "arrived" ? 1 : outcome.fraction);
 }
 
-/** Extrapolates the pose of value `i` from the four before; false where there are not four, evenly spaced. */
-function predict(poses: Float64Array, i: number, values: Float64Array, pose: Float64Array): boolean {
-  if (i < 4) return false;
-  const step = (values[i] as number) - (values[i - 1] as number);
-  for (let k = 1; k < 4; k++) {
-    const earlier = (values[i - k] as number) - (values[i - k - 1] as number);
-    if (!(Math.abs(earlier - step) <= 1e-9 * Math.abs(step))) return false;
-  }
-  const last = (i - 1) * POSE;
+/** Extrapolates the pose of value `i` from as many evenly spaced poses before it as there are, 1 … 4. */
+function predict(poses: Float64Array, i: number, values: Float64Array, pose: Float64Array): number {
+  const order = evenlySpaced(values, i);
+  const a = (i - 1) * POSE;
+  const b = a - POSE;
+  const c = b - POSE;
+  const d = c - POSE;
   for (let k = 0; k < POSE; k++) {
-    const a = poses[last + k] as number;
-    const b = poses[last - POSE + k] as number;
-    const c = poses[last - 2 * POSE + k] as number;
-    const d = poses[last - 3 * POSE + k] as number;
-    pose[k] = 4 * a - 6 * b + 4 * c - d;
+    const last = poses[a + k] as number;
+    if (order === 1) pose[k] = last;
+    else if (order === 2) pose[k] = 2 * last - (poses[b + k] as number);
+    else if (order === 3) pose[k] = 3 * (last - (poses[b + k] as number)) + (poses[c + k] as number);
+    else {
+      const middle = 4 * (poses[c + k] as number) - 6 * (poses[b + k] as number);
+      pose[k] = 4 * last + middle - (poses[d + k] as number);
+    }
   }
+  if (order > 1) makeUnit(pose);
+  return order;
+}
+
+/** How many values before `i`, at most 4, stand as far apart as value i from the last of them. */
+function evenlySpaced(values: Float64Array, i: number): number {
+  const step = (values[i] as number) - (values[i - 1] as number);
+  const most = i < 4 ? i : 4;
+  for (let k = 1; k < most; k++) {
+    const earlier = (values[i - k] as number) - (values[i - k - 1] as number);
+    if (!(Math.abs(earlier - step) <= 1e-9 * Math.abs(step))) return k;
+  }
+  return most;
+}
+
+function makeUnit(pose: Float64Array): void {
   const qw = pose[0] as number;
   const qx = pose[1] as number;
   const qy = pose[2] as number;
@@ -136,7 +164,6 @@ function predict(poses: Float64Array, i: number, values: Float64Array, pose: Flo
   pose[1] = qx * unit;
   pose[2] = qy * unit;
   pose[3] = qz * unit;
-  return true;
 }
 
 /** The twist per unit of one drive at the present, solved pose, into `system.step`. False: singular. */
