@@ -146,7 +146,7 @@ function predict(poses: Float64Array, i: number, values: Float64Array, pose: Flo
 /** How many values before `i`, at most 4, stand as far apart as value i from the last of them. */
 function evenlySpaced(values: Float64Array, i: number): number {
   const step = (values[i] as number) - (values[i - 1] as number);
-  const most = i < 4 ? i : 4;
+  const most = Math.min(i, 4);
   for (let k = 1; k < most; k++) {
     const earlier = (values[i - k] as number) - (values[i - k - 1] as number);
     if (!(Math.abs(earlier - step) <= 1e-9 * Math.abs(step))) return k;
