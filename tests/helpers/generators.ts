@@ -16,6 +16,9 @@ export const PROPERTY_RUNS = { seed: 20261201, numRuns: 100, maxSkipsPerRun: 1 }
  */
 export const SLOW_PROPERTY_RUNS = { ...PROPERTY_RUNS, numRuns: 30, endOnFailure: true } as const;
 
+/** ms. For properties that sweep whole axles, on a machine that others use too; they take seconds on an idle one. */
+export const SLOW_PROPERTY_MS = 60_000;
+
 /** Hundredths of a unit: whole numbers shrink to something a person can read. */
 function between(low: number, high: number): fc.Arbitrary<number> {
   return fc.integer({ min: Math.round(low * 100), max: Math.round(high * 100) }).map((n) => n / 100);

@@ -22,6 +22,13 @@ export const TOLERANCE = {
     reason:
       "a link that is solved for keeps its length; more than this would show that iteration stopped early",
   },
+  solve: {
+    name: "solve",
+    value: 1e-8,
+    unit: "degrees or mm",
+    reason:
+      "two solves of one pose, each closed to 1e-10 mm, measured up to some metres and some tens of gain away",
+  },
   referenceDeg: {
     name: "referenceDeg",
     value: 1e-6,

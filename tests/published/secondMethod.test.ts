@@ -6,7 +6,7 @@ import { describe, test } from "vitest";
 import { ALL_AXLES, FULL_TRAVEL, fullLock } from "../helpers/axles.ts";
 import { sweepByClosedForm } from "../helpers/closedForm/index.ts";
 import { columnTolerancesOf } from "../helpers/columnTolerances.ts";
-import { anyAxle, anyRearAxle, SLOW_PROPERTY_RUNS } from "../helpers/generators.ts";
+import { anyAxle, anyRearAxle, SLOW_PROPERTY_MS, SLOW_PROPERTY_RUNS } from "../helpers/generators.ts";
 import { expect } from "../helpers/matchers.ts";
 
 /** A column that the second method leaves null because a spring is missing is absent from the engine's row. */
@@ -46,21 +46,29 @@ describe.each(ALL_AXLES.map((axle) => [axle.name, axle] as const))("%s", (_name,
 });
 
 describe("axles of random but believable dimensions", () => {
-  test("agree with the second method, steered", () => {
-    fc.assert(
-      fc.property(anyAxle(), (axle) => {
-        expectAgreement(axle, { travels: [-60, -15, 0, 35, 60], steers: [-40, 0, 25] });
-      }),
-      SLOW_PROPERTY_RUNS,
-    );
-  });
+  test(
+    "agree with the second method, steered",
+    () => {
+      fc.assert(
+        fc.property(anyAxle(), (axle) => {
+          expectAgreement(axle, { travels: [-60, -15, 0, 35, 60], steers: [-40, 0, 25] });
+        }),
+        SLOW_PROPERTY_RUNS,
+      );
+    },
+    SLOW_PROPERTY_MS,
+  );
 
-  test("agree with it with a toe link, at another ride height", () => {
-    fc.assert(
-      fc.property(anyRearAxle(), fc.integer({ min: -40, max: 40 }), (axle, wheelUp) => {
-        expectAgreement(axle, { travels: [-60, -15, 0, 35, 60], steers: [0], wheelUp });
-      }),
-      SLOW_PROPERTY_RUNS,
-    );
-  });
+  test(
+    "agree with it with a toe link, at another ride height",
+    () => {
+      fc.assert(
+        fc.property(anyRearAxle(), fc.integer({ min: -40, max: 40 }), (axle, wheelUp) => {
+          expectAgreement(axle, { travels: [-60, -15, 0, 35, 60], steers: [0], wheelUp });
+        }),
+        SLOW_PROPERTY_RUNS,
+      );
+    },
+    SLOW_PROPERTY_MS,
+  );
 });

@@ -27,31 +27,32 @@ export function findBracketedRoot(f: (x: number) => number, low: number, high: n
 }
 
 /**
- * The first root of `f` met when walking from 0 towards `step`'s sign; null when `f` ends (returns null) or the walk
- * reaches `furthest` before. `f` may end between two steps: the last stretch is walked to within 1e-12.
+ * The first root of `f` met when walking from 0 by strides of `step`; null when `f` ends (returns null), turns back
+ * before it meets 0, or the walk reaches `furthest`. Where the next stride would do any of these it is halved, down to
+ * 1e-12, so that a root just before the end or the turning point is not missed.
  */
 export function findFirstRoot(
   f: (x: number) => number | null,
   step: number,
   furthest: number,
 ): number | null {
-  const atStart = f(0);
-  if (atStart === null) return null;
-  if (atStart === 0) return 0;
+  let atHere = f(0);
+  if (atHere === null) return null;
   let here = 0;
   let stride = step;
-  while (Math.abs(here) < furthest) {
+  while (atHere !== 0 && Math.abs(here) < furthest) {
     const next = here + stride;
     const atNext = f(next);
-    if (atNext === null) {
+    if (atNext !== null && atNext > 0 !== atHere > 0) {
+      return findBracketedRoot((x) => f(x) ?? Number.NaN, here, next);
+    }
+    if (atNext === null || Math.abs(atNext) >= Math.abs(atHere)) {
       if (Math.abs(stride) < 1e-12) return null;
       stride /= 2;
       continue;
     }
-    if (atNext > 0 !== atStart > 0) {
-      return findBracketedRoot((x) => f(x) ?? Number.NaN, here, next);
-    }
     here = next;
+    atHere = atNext;
   }
-  return null;
+  return atHere === 0 ? here : null;
 }

@@ -6,7 +6,8 @@ import { distance } from "./vector.ts";
 
 /** Coarse enough to be quick, fine enough that the wheel's height does not turn back within a step of a real linkage. */
 const WALK_RAD = 0.04;
-const FURTHEST_RAD = 1.4;
+/** A joint that has gone half way round its arm is back where it started from below. */
+const FURTHEST_RAD = Math.PI;
 
 /** The pose with the wheel centre `travel` above its design height; null when that cannot be reached. */
 export function poseAtTravel(parts: Parts, travel: number, held: Held): Pose | null {
