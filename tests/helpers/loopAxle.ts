@@ -47,7 +47,7 @@ const SPRING_REACH = 900;
  * `loop` drawn at input and output angles that fit together, turned so that between there and `towardsRad` the driven
  * joint rises (or sinks) as straight as it can, and set on the car's left. The wheel centre is the driven joint, so
  * wheel travel drives the crank alone. The tie rod only keeps the rod from spinning about itself: it runs beside one
- * of the cranks and copies it, the one that stands better across the rod.
+ * of the cranks and copies it: the driven one only if it stands much better across the rod, for that changes most.
  */
 export function placeLoop(
   loop: Loop,
@@ -70,7 +70,7 @@ export function placeLoop(
   const acrossRod = (crank: Crank, joint: Vector): number =>
     length(cross(rod, unit(subtract(joint, centreOf(crank)))));
   const [copied, copiedRad] =
-    acrossRod(input, inputJoint) > acrossRod(output, outputJoint)
+    acrossRod(input, inputJoint) > 2 * acrossRod(output, outputJoint)
       ? [input, drawn.inputRad]
       : [output, drawn.outputRad];
   const aside = scale(copied.axis, 100);

@@ -3,7 +3,7 @@
 import { type Axle, checkAxle, findFaults, poseAxle, type Sweep, sweepAxle } from "@linkwright/kinematics";
 import fc from "fast-check";
 import { describe, test } from "vitest";
-import { partsOf, poseAtTravel } from "../helpers/closedForm/index.ts";
+import { anglesOf, partsOf, poseAtTravel } from "../helpers/closedForm/index.ts";
 import {
   anyAxle,
   anyNastyAxle,
@@ -89,6 +89,33 @@ describe("no NaN, no infinity, no exception, and a reason for every null", () =>
     SLOW_PROPERTY_MS,
   );
 });
+
+// The second method keeps to the drawing's assembly by construction; the engine does by never stepping over a dead point.
+test(
+  "however far the inputs jump in one go, the linkage is never put together the other way round",
+  () => {
+    const far = fc.record({
+      steer: fc.integer({ min: -160, max: 160 }),
+      travel: fc.integer({ min: -120, max: 120 }),
+    });
+    let compared = 0;
+    fc.assert(
+      fc.property(anyAxle(), far, (axle, { steer, travel }) => {
+        const row = sweepAxle(axle, { travels: [travel], steers: [steer] }).rows[0];
+        for (const side of ["left", "right"] as const) {
+          const parts = partsOf(axle, side);
+          const pose = poseAtTravel(parts, travel, { by: "tieRod", steer });
+          if (!row?.[side] || pose === null) continue;
+          expect(row[side].toeDeg).toBeWithin(anglesOf(parts, pose).toeDeg, TOLERANCE.referenceDeg, side);
+          compared++;
+        }
+      }),
+      PROPERTY_RUNS,
+    );
+    expect(compared).toBeGreaterThan(PROPERTY_RUNS.numRuns / 2);
+  },
+  SLOW_PROPERTY_MS,
+);
 
 /** An upper arm a fraction of its drawn length: travel runs out within ±300 mm. */
 function anyShortArmedAxle(): fc.Arbitrary<Axle> {

@@ -354,3 +354,55 @@ describe("a Hooke joint bent by 25°", () => {
     expect(placed.speedRatio(at(0), 0)).toBeWithin(Math.cos(bend), TOLERANCE.roundOff);
   });
 });
+
+// Where three spheres meet (any text on trilateration). The upper arm's pivots and the lower ball joint are the centres.
+describe("trilateration", () => {
+  test.each([
+    {
+      name: "(1, 1, ±2), exactly",
+      centres: [
+        [0, 0, 0],
+        [400, 0, 0],
+        [100, 300, 0],
+      ],
+      radii: [100 * Math.sqrt(6), 100 * Math.sqrt(14), 100 * Math.sqrt(8)],
+      points: [
+        [100, 100, 200],
+        [100, 100, -200],
+      ],
+      tolerance: TOLERANCE.closure,
+    },
+    {
+      name: "a general case (derived)",
+      centres: [
+        [10, -20, 5],
+        [210, 35, -15],
+        [40, 300, 60],
+      ],
+      radii: [250, 260, 240],
+      points: [
+        [89.02035591, 112.57839485, 201.66914494],
+        [36.43008918, 177.30487698, -146.23569653],
+      ],
+      tolerance: printedTo(7, "mm"),
+    },
+  ] as const)("finds $name", ({ centres, radii, points, tolerance }) => {
+    const [first, second, third] = centres;
+    const along = unit(subtract(second, first));
+    // Both points are one turn of the arm about its pivots apart, so one loop closed on either branch finds either.
+    const span = length(subtract(second, first));
+    const foot = (radii[0] ** 2 - radii[1] ** 2 + span ** 2) / (2 * span);
+    const aside = unit(cross(along, subtract(third, first)));
+    const joint = add(add(first, scale(along, foot)), scale(aside, Math.sqrt(radii[0] ** 2 - foot ** 2)));
+    const loop: Loop = {
+      input: { origin: add(third, [0, 250, 0]), axis: [1, 0, 0], joint: third },
+      output: { origin: first, axis: along, joint },
+    };
+    const found = ([1, -1] as const).map((branch) => {
+      const { placed, side } = carry(loop, radii[2], branch, { drawnDeg: 12, toDeg: 0 });
+      return placed.outputJoint(side, 0);
+    });
+    const [upper, lower] = found[0]![2] > found[1]![2] ? found : [found[1], found[0]];
+    expect([upper, lower]).toBeWithin(points, tolerance);
+  });
+});

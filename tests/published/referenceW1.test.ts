@@ -1,7 +1,8 @@
 // The engine against W1, a complete corner worked out by three algorithms and reproduced by a general physics engine.
 
-import { type Axle, sweepAxle } from "@linkwright/kinematics";
+import { type Axle, poseAxle, sweepAxle, type Wishbone } from "@linkwright/kinematics";
 import { describe, test } from "vitest";
+import { across, cross, dot, subtract, unit, type Vector } from "../helpers/closedForm/vector.ts";
 import { expect } from "../helpers/matchers.ts";
 import {
   referenceW1,
@@ -64,6 +65,35 @@ describe("W1 over its travel", () => {
     const [below, above] = sweepAt(referenceW1, [-0.01, 0.01], [0]);
     const slope = (above!.left!.wheelCentre[1] - below!.left!.wheelCentre[1]) / 0.02;
     expect(slope).toBeWithin(w1Slopes.wheelCentreY, printedTo(9, "mm per mm"));
+  });
+});
+
+// The loop lower arm, knuckle, upper arm in closed form: J. M. McCarthy & G. S. Soh, Geometric Design of Linkages, 2011,
+// App. A. Turns about each arm's axis from rear to front pivot, right-handed.
+describe("W1's arms turn together as the closed form says", () => {
+  const { lowerArm, upperArm } = referenceW1.left.suspension;
+  const turnDeg = ({ frontPivot, rearPivot, ballJoint }: Wishbone, now: Vector): number => {
+    const axis = unit(subtract(frontPivot, rearPivot));
+    const [was, is] = [ballJoint, now].map((joint) => across(subtract(joint, rearPivot), axis)) as [
+      Vector,
+      Vector,
+    ];
+    return (Math.atan2(dot(axis, cross(was, is)), dot(was, is)) * 180) / Math.PI;
+  };
+
+  test.each([
+    [-60, -10.319557, -13.881909],
+    [-40, -6.836466, -9.218064],
+    [-20, -3.401211, -4.599967],
+    [20, 3.37968, 4.607749],
+    [40, 6.749565, 9.248809],
+    [60, 10.12105, 13.949542],
+  ])("at %d mm", (travel, lowerDeg, upperDeg) => {
+    const { points } = poseAxle(referenceW1, { travel: { left: travel, right: travel }, steer: 0 }).left!;
+    expect([
+      turnDeg(lowerArm, points["suspension.lowerArm.ballJoint"]!),
+      turnDeg(upperArm, points["suspension.upperArm.ballJoint"]!),
+    ]).toBeWithin([lowerDeg, upperDeg], printedTo(6, "degrees"));
   });
 });
 
