@@ -1,4 +1,4 @@
-// What the engine does off the main thread. Plain functions, so that tests and a page without workers call them too.
+// What the engine does off the main thread. A page that is given no worker calls the same functions itself.
 
 import {
   type Axle,
@@ -11,7 +11,7 @@ import {
 } from "@linkwright/kinematics";
 
 export const engine = {
-  flatten: (axle: Axle, request: FlattenRequest): FlattenOutcome => flatten(axle, request),
-  findFaults: (axle: Axle, heights: readonly Band[]): Fault[] => findFaults(axle, heights),
+  flatten: async (axle: Axle, request: FlattenRequest): Promise<FlattenOutcome> => flatten(axle, request),
+  findFaults: async (axle: Axle, heights: readonly Band[]): Promise<Fault[]> => findFaults(axle, heights),
 };
 export type Engine = typeof engine;

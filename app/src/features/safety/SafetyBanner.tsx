@@ -9,8 +9,8 @@ import { color, space } from "@/ui/theme/tokens.ts";
 import { useIsMedium } from "@/ui/useMediaQuery.ts";
 import { FaultList } from "./FaultList.tsx";
 import { FaultSign } from "./FaultSign.tsx";
+import { useKnownFaults } from "./FaultsProvider.tsx";
 import { type FaultPlace, type FaultReport, type NamedBand, reportFaults } from "./reports.ts";
-import { useFaults } from "./useFaults.ts";
 
 interface SafetyBannerProps {
   readonly axle: Axle;
@@ -22,9 +22,9 @@ interface SafetyBannerProps {
 /** What can kill, across the head of every study screen. Nothing is drawn while nothing is wrong. */
 export function SafetyBanner({ axle, heights, onShow }: SafetyBannerProps) {
   const { units, words } = usePreferences();
-  const { faults } = useFaults(axle, heights);
+  const faults = useKnownFaults();
   const reports = useMemo(
-    () => reportFaults(faults ?? [], { axle, heights, units, words }),
+    () => reportFaults(faults, { axle, heights, units, words }),
     [faults, axle, heights, units, words],
   );
   return reports.length > 0 ? <Banner reports={reports} onShow={onShow} /> : null;

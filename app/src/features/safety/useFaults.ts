@@ -12,20 +12,16 @@ interface Input {
   readonly heights: readonly NamedBand[];
 }
 
-interface Finding extends Input {
-  readonly faults: readonly Fault[];
-}
-
 /**
- * The faults of an axle at its ride heights, found beside the main thread. Until the first answer it is null; later
- * the last answer stands until the next, and `isCurrent` says whether it is still the one for this document.
+ * The faults of an axle at its ride heights, found beside the main thread. Null until the first answer; later the
+ * last answer stands until the next, so that a banner does not blink while one edits.
  */
-export function useFaults(axle: Axle, heights: readonly NamedBand[]) {
-  const [finding, setFinding] = useState<Finding | null>(null);
+export function useFaults(axle: Axle, heights: readonly NamedBand[]): readonly Fault[] | null {
+  const [faults, setFaults] = useState<readonly Fault[] | null>(null);
   const searcher = useRef<FaultSearcher | null>(null);
 
   useEffect(() => {
-    const current = createFaultSearcher(setFinding);
+    const current = createFaultSearcher(setFaults);
     searcher.current = current;
     return current.stop;
   }, []);
@@ -35,8 +31,7 @@ export function useFaults(axle: Axle, heights: readonly NamedBand[]) {
     return () => clearTimeout(rest);
   }, [axle, heights]);
 
-  const isCurrent = finding !== null && finding.axle === axle && finding.heights === heights;
-  return { faults: finding?.faults ?? null, isCurrent };
+  return faults;
 }
 
 interface FaultSearcher {
@@ -45,7 +40,7 @@ interface FaultSearcher {
 }
 
 /** One search at a time; of those that come meanwhile only the newest is kept. */
-function createFaultSearcher(tell: (finding: Finding) => void): FaultSearcher {
+function createFaultSearcher(tell: (faults: readonly Fault[]) => void): FaultSearcher {
   let worker: RunningEngine | null = null;
   let isBusy = false;
   let isStopped = false;
@@ -67,7 +62,7 @@ function createFaultSearcher(tell: (finding: Finding) => void): FaultSearcher {
       const input: Input = next;
       next = null;
       const faults = await find(input);
-      if (!isStopped && next === null) tell({ ...input, faults });
+      if (!isStopped && next === null) tell(faults);
     }
     isBusy = false;
   };

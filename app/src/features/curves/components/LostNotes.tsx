@@ -1,20 +1,30 @@
 import type { LengthUnit } from "@linkwright/contract";
+import type { Axle, RideHeight } from "@linkwright/kinematics";
+import { useMemo } from "react";
 import { View } from "react-native";
 import { linkInWords } from "@/features/safety/index.ts";
 import { capitalise } from "@/lib/dialect.ts";
 import { formatLength } from "@/lib/format.ts";
 import { Notice } from "@/ui/Notice.tsx";
 import { Text } from "@/ui/Text.tsx";
+import type { TravelRange } from "../series/heights.ts";
 import { type LostPart, lostParts } from "../series/lost.ts";
 import type { Reading } from "../series/panels.ts";
-import type { HeightSweep } from "../series/sweepHeight.ts";
+import { sweepHeight } from "../series/sweepHeight.ts";
+
+interface LostNotesProps {
+  readonly axle: Axle;
+  readonly height: RideHeight;
+  readonly range: TravelRange;
+  readonly reading: Reading;
+}
 
 /** What of a band the linkage cannot follow: the curve ends there, and so does what the target judges. */
-export function LostNotes({ sweep, reading }: { sweep: HeightSweep; reading: Reading }) {
-  const parts = lostParts(sweep);
+export function LostNotes({ axle, height, range, reading }: LostNotesProps) {
+  const parts = useMemo(() => lostParts(sweepHeight(axle, height, range)), [axle, height, range]);
   if (parts.length === 0) return null;
   return (
-    <Notice kind="fault" title={`Part of the band at ${sweep.height.name} is lost`}>
+    <Notice kind="fault" title={`Part of the band at ${height.name} is lost`}>
       <View role="list">
         {parts.map((part) => (
           <View role="listitem" key={`${part.side} ${part.way}`}>

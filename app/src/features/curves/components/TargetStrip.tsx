@@ -1,21 +1,17 @@
-import type { LengthUnit } from "@linkwright/contract";
-import type { Axle, RideHeight, Target } from "@linkwright/kinematics";
-import { memo, useMemo } from "react";
+import { memo, useDeferredValue, useMemo } from "react";
 import { StyleSheet, View } from "react-native";
-import type { DialectWord } from "@/lib/dialect.ts";
 import { Figure, Text } from "@/ui/Text.tsx";
 import { type ColorName, color, space } from "@/ui/theme/tokens.ts";
 import { useIsWide } from "@/ui/useMediaQuery.ts";
+import type { Reading } from "../series/panels.ts";
 import { type Judgement, judgeTargets, type Verdict } from "../targets/judge.ts";
 import { formatQuantity, quantityName } from "../targets/targetWords.ts";
+import type { Bench } from "../useBench.ts";
 import { VerdictText } from "./VerdictText.tsx";
 
 interface TargetStripProps {
-  readonly axle: Axle;
-  readonly heights: readonly RideHeight[];
-  readonly targets: readonly Target[];
-  readonly units: LengthUnit;
-  readonly words: Readonly<Record<DialectWord, string>>;
+  readonly bench: Bench;
+  readonly reading: Reading;
 }
 
 const BAR: Readonly<Record<Verdict, ColorName>> = {
@@ -26,8 +22,10 @@ const BAR: Readonly<Record<Verdict, ColorName>> = {
 };
 
 /** Every target with its worst value of all ride heights. Nothing where there are no targets. */
-export const TargetStrip = memo(function TargetStrip(props: TargetStripProps) {
-  const { axle, heights, targets, units, words } = props;
+export const TargetStrip = memo(function TargetStrip({ bench, reading }: TargetStripProps) {
+  const { units, words } = reading;
+  // Judging takes a frame's worth of solving: it comes after the curves, which a drag must not wait for.
+  const { axle, heights, targets } = useDeferredValue(bench);
   const isWide = useIsWide();
   const judgements = useMemo(() => judgeTargets(axle, heights, targets), [axle, heights, targets]);
   if (judgements.length === 0) return null;

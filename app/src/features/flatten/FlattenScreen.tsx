@@ -1,0 +1,136 @@
+import { useMemo } from "react";
+import { StyleSheet, View } from "react-native";
+import { type Bench, LinkagePane, TargetStrip, useBench, useReading } from "@/features/curves/index.ts";
+import { ResizablePanes } from "@/ui/ResizablePanes.tsx";
+import { color, space } from "@/ui/theme/tokens.ts";
+import { useIsWide } from "@/ui/useMediaQuery.ts";
+import { FlattenCurves } from "./components/FlattenCurves.tsx";
+import { MovesPanel } from "./components/MovesPanel.tsx";
+import { SearchNotes } from "./components/SearchNotes.tsx";
+import { SearchPanel } from "./components/SearchPanel.tsx";
+import { useFlatten } from "./useFlatten.ts";
+
+/** Move the rack until the toe curve is flat at every ride height. */
+export function FlattenScreen() {
+  const bench = useBench();
+  const isWide = useIsWide();
+  // A draft that cannot be built has no curve; the study's own notice tells why and offers the way back.
+  if (bench === null) return null;
+  return isWide ? <WideFlatten bench={bench} /> : <PhoneFlatten bench={bench} />;
+}
+
+const WIDE_QUANTITIES = ["toe", "camber", "caster"] as const;
+const PHONE_QUANTITIES = ["toe"] as const;
+const PHONE_BOARD = 340;
+
+function WideFlatten({ bench }: { bench: Bench }) {
+  const { reading } = useReading();
+  const flatten = useFlatten(bench);
+  const { moved } = flatten;
+  const movedBench = useMemo(() => ({ ...bench, axle: moved }), [bench, moved]);
+  const panes = [
+    {
+      id: "moves",
+      label: "Moves",
+      size: 25,
+      minSize: 320,
+      content: (
+        <View style={styles.side}>
+          <MovesPanel bench={flatten} reading={reading} />
+          <SearchNotes bench={flatten} reading={reading} />
+          <View style={styles.foot}>
+            <SearchPanel bench={flatten} />
+          </View>
+        </View>
+      ),
+    },
+    {
+      id: "picture",
+      label: "Linkage",
+      size: 30,
+      minSize: 260,
+      content: (
+        <LinkagePane
+          axle={moved}
+          heights={bench.heights}
+          units={reading.units}
+          highlight="left.tieRod.inner"
+        />
+      ),
+    },
+    {
+      id: "curves",
+      label: "Curves",
+      size: 45,
+      minSize: 420,
+      content: (
+        <View style={styles.curves}>
+          <FlattenCurves bench={bench} flatten={flatten} reading={reading} quantities={WIDE_QUANTITIES} />
+        </View>
+      ),
+    },
+  ];
+  return (
+    <View style={styles.wide}>
+      <View style={styles.panes}>
+        <ResizablePanes id="flatten" panes={panes} />
+      </View>
+      <TargetStrip bench={movedBench} reading={reading} />
+    </View>
+  );
+}
+
+function PhoneFlatten({ bench }: { bench: Bench }) {
+  const { reading } = useReading();
+  const flatten = useFlatten(bench);
+  return (
+    <View>
+      <View style={styles.phone}>
+        <FlattenCurves
+          bench={bench}
+          flatten={flatten}
+          reading={reading}
+          quantities={PHONE_QUANTITIES}
+          height={PHONE_BOARD}
+        />
+        <MovesPanel bench={flatten} reading={reading} />
+        <SearchNotes bench={flatten} reading={reading} />
+      </View>
+      <View style={styles.thumb}>
+        <SearchPanel bench={flatten} />
+      </View>
+    </View>
+  );
+}
+
+/** The foot bar of the study's tabs, which stays in sight below. */
+const FOOT_BAR = 63;
+
+const styles = StyleSheet.create({
+  wide: { flex: 1, minHeight: 0 },
+  panes: { flex: 1, minHeight: 0 },
+  side: { flexGrow: 1, padding: space.l, gap: space.m, backgroundColor: color.panel },
+  foot: {
+    position: "sticky",
+    bottom: 0,
+    marginTop: "auto",
+    marginHorizontal: -space.l,
+    marginBottom: -space.l,
+    padding: space.l,
+    backgroundColor: color.panel,
+    borderTopWidth: 1,
+    borderTopColor: color.rule,
+  } as object,
+  curves: { flexGrow: 1, padding: space.l },
+  phone: { padding: space.l, gap: space.l },
+  thumb: {
+    position: "sticky",
+    bottom: FOOT_BAR,
+    zIndex: 5,
+    paddingHorizontal: space.l,
+    paddingVertical: space.s,
+    backgroundColor: color.panel,
+    borderTopWidth: 1,
+    borderTopColor: color.rule,
+  } as object,
+});

@@ -1,0 +1,2 @@
+export { FlattenProvider } from "./FlattenProvider.tsx";
+export { FlattenScreen } from "./FlattenScreen.tsx";

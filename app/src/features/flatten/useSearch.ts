@@ -1,0 +1,61 @@
+import type { FlattenOutcome } from "@linkwright/kinematics";
+import { useCallback, useEffect, useRef, useState } from "react";
+import { type RunningEngine, startEngine } from "@/workers/engineClient.ts";
+import type { Search } from "./moves.ts";
+
+export type SearchState =
+  | { readonly status: "idle" }
+  | { readonly status: "busy" }
+  /** The answer to this very search; `search` tells whether it still is the one asked for. */
+  | { readonly status: "answered"; readonly search: Search; readonly outcome: FlattenOutcome }
+  | { readonly status: "failed"; readonly error: unknown };
+
+const IDLE: SearchState = { status: "idle" };
+
+/**
+ * Finds the flattest in a worker of its own. Cancelling ends the worker; an answer to a search that is no longer the
+ * present one is dropped.
+ */
+export function useSearch(present: Search, onFound: (outcome: FlattenOutcome) => void) {
+  const [state, setState] = useState<SearchState>(IDLE);
+  const running = useRef<{ readonly engine: RunningEngine; readonly search: Search } | null>(null);
+  const tell = useRef(onFound);
+  tell.current = onFound;
+
+  const stop = useCallback(() => {
+    running.current?.engine.stop();
+    running.current = null;
+  }, []);
+  useEffect(() => stop, [stop]);
+
+  // Another drawing, other bounds: what is being searched for is no longer asked.
+  useEffect(() => {
+    if (running.current === null || running.current.search === present) return;
+    stop();
+    setState(IDLE);
+  }, [present, stop]);
+
+  const cancel = useCallback(() => {
+    stop();
+    setState(IDLE);
+  }, [stop]);
+
+  const find = useCallback(async () => {
+    stop();
+    const mine = { engine: startEngine(), search: present };
+    running.current = mine;
+    setState({ status: "busy" });
+    try {
+      const outcome = await mine.engine.ask((remote) => remote.flatten(present.axle, present.request));
+      if (running.current !== mine) return;
+      setState({ status: "answered", search: present, outcome });
+      tell.current(outcome);
+    } catch (error) {
+      if (running.current === mine) setState({ status: "failed", error });
+    } finally {
+      if (running.current === mine) stop();
+    }
+  }, [present, stop]);
+
+  return { state, find, cancel };
+}

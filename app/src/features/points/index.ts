@@ -1,0 +1,4 @@
+export { StepChoice } from "./components/StepChoice.tsx";
+export { EntryProvider } from "./entry/EntryProvider.tsx";
+export { useStep } from "./entry/useStep.ts";
+export { PointsScreen } from "./PointsScreen.tsx";
