@@ -4,17 +4,11 @@ import { type Axle, checkAxle, findFaults, poseAxle, type Sweep, sweepAxle } fro
 import fc from "fast-check";
 import { describe, test } from "vitest";
 import { anglesOf, partsOf, poseAtTravel } from "../helpers/closedForm/index.ts";
-import {
-  anyAxle,
-  anyNastyAxle,
-  anyStrainedAxle,
-  PROPERTY_RUNS,
-  SLOW_PROPERTY_MS,
-  SLOW_PROPERTY_RUNS,
-} from "../helpers/generators.ts";
+import { anyAxle, PROPERTY_RUNS, SLOW_PROPERTY_MS, SLOW_PROPERTY_RUNS } from "../helpers/generators.ts";
 import { expect } from "../helpers/matchers.ts";
 import { translatingAxle, uprightKingpins } from "../helpers/planarAxles.ts";
 import { TOLERANCE } from "../helpers/tolerances.ts";
+import { anyNastyAxle, anyStrainedAxle } from "../helpers/unsoundAxles.ts";
 
 const GRID = { travels: [-160, -90, -30, 0, 30, 90, 160], steers: [-60, 0, 25] };
 
