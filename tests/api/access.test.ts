@@ -145,6 +145,7 @@ describe.each(ROLES)("a %s of the workshop", (role) => {
     "at %s is let in if the policy says so, and told so if not",
     async (_name, route) => {
       const reply = await request(house.shop.members[role].client, route);
+      expect(reply.text).not.toMatch(/argon2|password/i);
       const action = route.access as Exclude<Route["access"], "public" | "signedIn">; // ofWorkshops leaves those out
       if (may(role, action))
         expect(OUTCOMES.get(route) ?? [route.status], reply.text).toContain(reply.status);

@@ -21,6 +21,8 @@ const CONNECT_TIMEOUT_MS = 3000;
 const ANSWER_TIMEOUT_MS = 30_000;
 
 export function createStorage(settings: StorageSettings): Storage {
+  // It warns that its releases from 2027 on need a newer Node.js; ours is pinned to one that does not.
+  process.env.AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED ??= "true";
   const client = new S3Client({
     endpoint: settings.S3_ENDPOINT,
     region: settings.S3_REGION,

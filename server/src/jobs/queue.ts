@@ -30,7 +30,11 @@ function throughTransaction(tx: Tx): PgBoss.Db {
 /** pg-boss numbers its parameters ($1, $2 …); drizzle wants them where they stand. */
 function bind(text: string, values: readonly unknown[]): SQL {
   const parts = text.split(/\$(\d+)/);
-  return sql.join(parts.map((part, at) => (at % 2 === 0 ? sql.raw(part) : sql`${sql.param(values[Number(part) - 1] ?? null)}`)));
+  return sql.join(
+    parts.map((part, at) =>
+      at % 2 === 0 ? sql.raw(part) : sql`${sql.param(values[Number(part) - 1] ?? null)}`,
+    ),
+  );
 }
 
 function refuseOwnConnection(): never {
