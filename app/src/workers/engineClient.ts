@@ -1,11 +1,11 @@
 // Starting, asking and stopping an engine in a worker of its own. Stopping ends whatever it was at.
 
-import { type Remote, releaseProxy, wrap } from "comlink";
+import { releaseProxy, wrap } from "comlink";
 import type { Engine } from "./engine.ts";
 
 export interface RunningEngine {
   /** Rejects when the worker cannot be loaded or dies; never settles once it has been stopped. */
-  readonly ask: <Answer>(question: (remote: Remote<Engine>) => Promise<Answer>) => Promise<Answer>;
+  readonly ask: <Answer>(question: (engine: Engine) => Promise<Answer>) => Promise<Answer>;
   readonly stop: () => void;
 }
 
@@ -19,7 +19,9 @@ export function startEngine(): RunningEngine {
   // Whoever asks hears of it; with nobody asking, it is no unhandled rejection.
   failed.catch(() => undefined);
   return {
-    ask: (question) => Promise.race([question(remote), failed]),
+    // The engine's functions all answer by promise, so from here they look as they are; comlink's own types take
+    // an answer that is a union apart.
+    ask: (question) => Promise.race([question(remote as unknown as Engine), failed]),
     stop: () => {
       remote[releaseProxy]();
       worker.terminate();

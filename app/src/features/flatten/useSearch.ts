@@ -46,7 +46,7 @@ export function useSearch(present: Search, onFound: (outcome: FlattenOutcome) =>
     running.current = mine;
     setState({ status: "busy" });
     try {
-      const outcome = await mine.engine.ask((remote) => remote.flatten(present.axle, present.request));
+      const outcome = await mine.engine.ask((there) => there.flatten(present.axle, present.request));
       if (running.current !== mine) return;
       setState({ status: "answered", search: present, outcome });
       tell.current(outcome);

@@ -49,7 +49,7 @@ function createFaultSearcher(tell: (faults: readonly Fault[]) => void): FaultSea
   const find = async ({ axle, heights }: Input): Promise<Fault[]> => {
     try {
       worker ??= startEngine();
-      return await worker.ask((remote) => remote.findFaults(axle, heights));
+      return await worker.ask((there) => there.findFaults(axle, heights));
     } catch {
       // A browser that gives us no worker is no reason to keep silent about what can kill.
       return engine.findFaults(axle, heights);
