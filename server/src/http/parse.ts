@@ -6,15 +6,13 @@ import { ServiceError } from "./problems.ts";
 
 /** Deeper than any document of ours, and shallow enough for everything that walks it by recursion. */
 const DEEPEST = 32;
-/** What is repeated in a problem is for finding the place, not for sending it all back. */
-const LONGEST_ECHO = 200;
 
 export function parseBody<T extends z.ZodType>(schema: T, body: unknown): z.output<T> {
   const unfit = findUnfit(body);
   if (unfit) throw new ServiceError("invalid", { issues: [unfit] });
   const parsed = schema.safeParse(body);
   if (parsed.success) return parsed.data;
-  throw new ServiceError("invalid", { issues: issuesFromZod(parsed.error, body).map(withoutSecrets) });
+  throw new ServiceError("invalid", { issues: issuesFromZod(parsed.error, body) });
 }
 
 /** A path that cannot be one of ours leads to nothing, so the answer is the same as for an id that nobody has. */
@@ -54,11 +52,4 @@ function unstorable(path: (string | number)[]): ProblemIssue {
 
 function tooDeep(path: (string | number)[]): ProblemIssue {
   return { path, problem: `This is nested deeper than ${DEEPEST} levels.`, hint: "Send a flatter document." };
-}
-
-function withoutSecrets(issue: ProblemIssue): ProblemIssue {
-  const { value, ...rest } = issue;
-  const isSecret = issue.path.some((step) => /password/i.test(String(step)));
-  const text = JSON.stringify(value);
-  return isSecret || text === undefined || text.length > LONGEST_ECHO ? rest : issue;
 }

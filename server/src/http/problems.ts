@@ -4,6 +4,7 @@ import type { DraftConflict, Problem, ProblemCode, ProblemIssue } from "@linkwri
 import type { ErrorRequestHandler, Response } from "express";
 import { describeError, type Log } from "../log.ts";
 import { isDatabaseAway, postgresCode } from "./databaseErrors.ts";
+import { presentIssue } from "./issues.ts";
 import { requestId } from "./requestId.ts";
 
 export interface ServiceErrorDetails {
@@ -140,7 +141,7 @@ function sendProblem(response: Response, error: ServiceError): void {
     detail: error.message,
     code: error.code,
     requestId: requestId(response),
-    ...(issues && { issues: [...issues] }),
+    ...(issues && { issues: issues.map(presentIssue) }),
     ...(conflict && { conflict }),
     ...(retryAfterSeconds !== undefined && { retryAfterSeconds }),
   };
