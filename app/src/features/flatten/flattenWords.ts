@@ -2,7 +2,7 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import { type FlattenOutcome, type Move, type Steering, steeringUnit } from "@linkwright/kinematics";
-import { formatAngle, formatAngleGradient, formatLength } from "@/lib/format.ts";
+import { formatAngle, formatAngleGradient, formatLength } from "../../lib/format.ts";
 import type { Leftover } from "./leftover.ts";
 import type { MoveSettings, OfferedMove } from "./moves.ts";
 

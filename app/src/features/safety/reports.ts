@@ -2,8 +2,8 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import { type Axle, type Fault, poseAxle, type RideHeight, type Side } from "@linkwright/kinematics";
-import { capitalise, type DialectWord } from "@/lib/dialect.ts";
-import { formatAngle, formatLength } from "@/lib/format.ts";
+import { capitalise, type DialectWord } from "../../lib/dialect.ts";
+import { formatAngle, formatLength } from "../../lib/format.ts";
 import { linkInWords } from "./linkWords.ts";
 import { steerInWords } from "./steerWords.ts";
 

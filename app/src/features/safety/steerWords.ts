@@ -3,7 +3,7 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import { type Axle, steeringLock, steeringUnit, steerPerInput } from "@linkwright/kinematics";
-import { formatAngle, formatLength } from "@/lib/format.ts";
+import { formatAngle, formatLength } from "../../lib/format.ts";
 
 /** mm or degrees. Closer to full lock than this is full lock: a slider's steps need not divide it. */
 const AT_LOCK = 0.05;

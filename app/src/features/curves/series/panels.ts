@@ -1,8 +1,8 @@
 // How each quantity's panel is titled, scaled and read.
 
 import type { LengthUnit } from "@linkwright/contract";
-import { capitalise, type DialectWord } from "@/lib/dialect.ts";
-import { formatAngle, formatLength, formatNumber, lengthFromMm, unitSymbol } from "@/lib/format.ts";
+import { capitalise, type DialectWord } from "../../../lib/dialect.ts";
+import { formatAngle, formatLength, formatNumber, lengthFromMm, unitSymbol } from "../../../lib/format.ts";
 import type { Quantity } from "./sweepHeight.ts";
 import { formatToe, type ToeDisplay, toeShown, toeUnit } from "./toeDisplay.ts";
 

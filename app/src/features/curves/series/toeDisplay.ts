@@ -2,7 +2,7 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import { radFromDeg } from "@linkwright/kinematics";
-import { formatAngle, formatLength, formatLengthFigure } from "@/lib/format.ts";
+import { formatAngle, formatLength, formatLengthFigure } from "../../../lib/format.ts";
 
 export type ToeDisplay =
   | { readonly as: "degrees" }

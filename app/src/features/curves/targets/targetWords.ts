@@ -2,7 +2,7 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import type { Target, TargetQuantity } from "@linkwright/kinematics";
-import { capitalise, type DialectWord } from "@/lib/dialect.ts";
+import { capitalise, type DialectWord } from "../../../lib/dialect.ts";
 import {
   formatAngle,
   formatAngleGradient,
@@ -10,7 +10,7 @@ import {
   formatPercent,
   NO_VALUE,
   unitSymbol,
-} from "@/lib/format.ts";
+} from "../../../lib/format.ts";
 import type { Judgement } from "./judge.ts";
 
 type Words = Readonly<Record<DialectWord, string>>;

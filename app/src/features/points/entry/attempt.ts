@@ -3,7 +3,7 @@
 import { applyEdits, isWithin, parseStudy } from "@linkwright/contract";
 import type { Issue, Path, Study } from "@linkwright/kinematics";
 import type { Change } from "@/features/study/index.ts";
-import { isSameJson } from "@/lib/json.ts";
+import { isSameJson } from "../../../lib/json.ts";
 
 export interface Kept {
   readonly change: Change;

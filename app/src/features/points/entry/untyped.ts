@@ -1,4 +1,4 @@
-import { parseNumber } from "@/lib/parseNumber.ts";
+import { parseNumber } from "../../../lib/parseNumber.ts";
 
 /** Whether a field shows its value as it is, rounded as fields round, so that undo means the drawing and not the typing. */
 export function isUntyped(text: string, value: number): boolean {

@@ -1,7 +1,7 @@
 // Numbers of the document as a person reads and types them.
 
 import type { LengthUnit } from "@linkwright/contract";
-import { formatNumber, lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "@/lib/format.ts";
+import { formatNumber, lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "../../../lib/format.ts";
 
 export type FieldKind =
   | "length"

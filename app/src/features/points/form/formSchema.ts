@@ -2,7 +2,7 @@
 
 import type { LengthUnit } from "@linkwright/contract";
 import { z } from "zod";
-import { parseNumber } from "@/lib/parseNumber.ts";
+import { parseNumber } from "../../../lib/parseNumber.ts";
 import { type FieldKind, textFrom, valueFrom } from "./fieldKinds.ts";
 
 export interface FormField {
