@@ -143,10 +143,13 @@ describe("signing in", () => {
       await client.refused(authRoutes.signIn, {}, { email, password: "not the password" });
       return performance.now() - began;
     };
-    // The least of several, so that a busy machine does not count. Without the hash it is a twentieth, not a half.
-    const least = async (email: string) =>
-      Math.min(await spend(email), await spend(email), await spend(email));
-    expect(await least(`${randomUUID()}@example.org`)).toBeGreaterThan(0.5 * (await least(request.email)));
+    const spent: Record<"nobody" | "somebody", number[]> = { nobody: [], somebody: [] };
+    for (let round = 0; round < 4; round += 1) {
+      spent.nobody.push(await spend(`${randomUUID()}@example.org`));
+      spent.somebody.push(await spend(request.email));
+    }
+    // The least of several, taken in turns, so that a busy machine does not count. Without the hash it is a twentieth.
+    expect(Math.min(...spent.nobody)).toBeGreaterThan(0.3 * Math.min(...spent.somebody));
   });
 
   test("sets a cookie that scripts cannot read and other sites do not send", async () => {
