@@ -183,6 +183,31 @@ describe("open routes", () => {
   );
 });
 
+describe("bad input", () => {
+  const withBody = named.filter(([, route]) => BODIES.get(route)?.() !== undefined);
+  const withIds = named.filter(([, route]) => route.path.includes("/:"));
+  const owner = () => house.shop.members.owner.client;
+
+  test.each(withBody)("at %s: a member that nobody knows is refused by its name", async (_name, route) => {
+    const body = { ...(BODIES.get(route)!() as object), surprise: 1 };
+    const problem = problemOf(await owner().send(route.method, fill(route, house.shop.id), { body }));
+    expect(problem.code).toBe("invalid");
+    expect(problem.issues!.map(({ path }) => path)).toEqual([["surprise"]]);
+  });
+
+  test.each(withBody)("at %s: a list for a body is refused", async (_name, route) => {
+    const reply = await owner().send(route.method, fill(route, house.shop.id), { body: [] });
+    expect(problemOf(reply).code).toBe("invalid");
+  });
+
+  test.each(withIds)("at %s: an id that is none leads nowhere", async (_name, route) => {
+    const path = route.path.replace(/:\w+/g, "';--");
+    const body = BODIES.get(route)!();
+    const reply = await owner().send(route.method, path, body === undefined ? {} : { body });
+    expect(problemOf(reply).code).toBe("not_found");
+  });
+});
+
 interface Layer {
   readonly route?: { readonly path: string; readonly methods?: Record<string, boolean> };
   readonly handle: { readonly stack?: Layer[] };
