@@ -9,6 +9,7 @@ import { HeightsFigures } from "./components/HeightsFigures.tsx";
 import { LinkagePane } from "./components/LinkagePane.tsx";
 import { StartingTargets } from "./components/StartingTargets.tsx";
 import { TargetStrip } from "./components/TargetStrip.tsx";
+import { ToeChoice } from "./components/ToeChoice.tsx";
 import { heightFigures } from "./series/figures.ts";
 import type { Reading } from "./series/panels.ts";
 import { QUANTITIES, type Quantity } from "./series/sweepHeight.ts";
@@ -87,13 +88,7 @@ function PhoneCurves({ bench }: { bench: Bench }) {
   const quantities = useMemo(() => [quantity], [quantity]);
   return (
     <View style={styles.phone}>
-      <CurvesHead
-        heights={bench.heights}
-        reading={reading}
-        onToe={chooseToe}
-        quantity={quantity}
-        onQuantity={setQuantity}
-      />
+      <CurvesHead heights={bench.heights} reading={reading} quantity={quantity} onQuantity={setQuantity} />
       <CurveBoard
         {...bench}
         earlier={earlier}
@@ -103,6 +98,7 @@ function PhoneCurves({ bench }: { bench: Bench }) {
         height={PHONE_BOARD}
       />
       <Below bench={bench} reading={reading} />
+      <ToeChoice reading={reading} onChoose={chooseToe} />
       <View style={styles.bleed}>
         <LinkagePane axle={bench.axle} heights={bench.heights} units={units} height={PHONE_PICTURE} />
       </View>

@@ -1,10 +1,17 @@
 import { useMemo } from "react";
 import { StyleSheet, View } from "react-native";
-import { type Bench, LinkagePane, TargetStrip, useBench, useReading } from "@/features/curves/index.ts";
+import {
+  type Bench,
+  LinkagePane,
+  StartingTargets,
+  TargetStrip,
+  useBench,
+  useReading,
+} from "@/features/curves/index.ts";
 import { ResizablePanes } from "@/ui/ResizablePanes.tsx";
 import { color, space } from "@/ui/theme/tokens.ts";
 import { useIsWide } from "@/ui/useMediaQuery.ts";
-import { FlattenCurves } from "./components/FlattenCurves.tsx";
+import { Comparison, FlattenCurves, Leftover } from "./components/FlattenCurves.tsx";
 import { MovesPanel } from "./components/MovesPanel.tsx";
 import { SearchNotes } from "./components/SearchNotes.tsx";
 import { SearchPanel } from "./components/SearchPanel.tsx";
@@ -21,18 +28,19 @@ export function FlattenScreen() {
 
 const WIDE_QUANTITIES = ["toe", "camber", "caster"] as const;
 const PHONE_QUANTITIES = ["toe"] as const;
-const PHONE_BOARD = 340;
+const PHONE_BOARD = 290;
 
 function WideFlatten({ bench }: { bench: Bench }) {
   const { reading } = useReading();
   const flatten = useFlatten(bench);
   const { moved } = flatten;
+  const parts = { bench, flatten, reading };
   const movedBench = useMemo(() => ({ ...bench, axle: moved }), [bench, moved]);
   const panes = [
     {
       id: "moves",
       label: "Moves",
-      size: 25,
+      size: 24,
       minSize: 320,
       content: (
         <View style={styles.side}>
@@ -47,7 +55,7 @@ function WideFlatten({ bench }: { bench: Bench }) {
     {
       id: "picture",
       label: "Linkage",
-      size: 30,
+      size: 29,
       minSize: 260,
       content: (
         <LinkagePane
@@ -61,11 +69,14 @@ function WideFlatten({ bench }: { bench: Bench }) {
     {
       id: "curves",
       label: "Curves",
-      size: 45,
+      size: 47,
       minSize: 420,
       content: (
         <View style={styles.curves}>
-          <FlattenCurves bench={bench} flatten={flatten} reading={reading} quantities={WIDE_QUANTITIES} />
+          <FlattenCurves {...parts} quantities={WIDE_QUANTITIES} />
+          <Comparison {...parts} of="all" />
+          <Leftover {...parts} />
+          <StartingTargets units={reading.units} />
         </View>
       ),
     },
@@ -83,18 +94,17 @@ function WideFlatten({ bench }: { bench: Bench }) {
 function PhoneFlatten({ bench }: { bench: Bench }) {
   const { reading } = useReading();
   const flatten = useFlatten(bench);
+  const parts = { bench, flatten, reading };
   return (
     <View>
       <View style={styles.phone}>
-        <FlattenCurves
-          bench={bench}
-          flatten={flatten}
-          reading={reading}
-          quantities={PHONE_QUANTITIES}
-          height={PHONE_BOARD}
-        />
+        <FlattenCurves {...parts} quantities={PHONE_QUANTITIES} height={PHONE_BOARD} />
+        <Comparison {...parts} of="chosen" />
         <MovesPanel bench={flatten} reading={reading} />
         <SearchNotes bench={flatten} reading={reading} />
+        <Leftover {...parts} />
+        <Comparison {...parts} of="others" />
+        <StartingTargets units={reading.units} />
       </View>
       <View style={styles.thumb}>
         <SearchPanel bench={flatten} />
@@ -121,8 +131,8 @@ const styles = StyleSheet.create({
     borderTopWidth: 1,
     borderTopColor: color.rule,
   } as object,
-  curves: { flexGrow: 1, padding: space.l },
-  phone: { padding: space.l, gap: space.l },
+  curves: { flexGrow: 1, padding: space.l, gap: space.m },
+  phone: { padding: space.l, gap: space.m },
   thumb: {
     position: "sticky",
     bottom: FOOT_BAR,

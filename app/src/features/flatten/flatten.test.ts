@@ -98,7 +98,7 @@ describe("what is left of a curve", () => {
   test("the words name the way the toe goes", () => {
     const slope = curve((travel) => -0.002 * travel);
     expect(slope && leftoverInWords(slope, "mm")).toEqual({
-      lead: "What is left is mostly a slope: toe-out in bump.",
+      lead: "what is left is mostly a slope: toe-out in bump.",
       detail: "Slope and bow that fit the curve best: slope −0.0020 °/mm, bow 0.000°; 0.000° is neither.",
     });
   });

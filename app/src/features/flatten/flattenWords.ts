@@ -76,18 +76,18 @@ export function leftoverInWords(leftover: Leftover, units: LengthUnit): Leftover
   const detail = `Slope and bow that fit the curve best: ${slope}, ${bow}; ${formatAngle(restDeg, { decimals: 3 })} is neither.`;
   switch (kind) {
     case "nothing":
-      return { lead: "Nothing measurable is left.", detail };
+      return { lead: "nothing measurable is left.", detail };
     case "slope":
       return {
-        lead: `What is left is mostly a slope: ${slopeDegPerMm > 0 ? "toe-in" : "toe-out"} in bump.`,
+        lead: `what is left is mostly a slope: ${slopeDegPerMm > 0 ? "toe-in" : "toe-out"} in bump.`,
         detail,
       };
     case "bow":
       return {
-        lead: `What is left is mostly a bow: ${bowDeg > 0 ? "toe-in" : "toe-out"} at both ends.`,
+        lead: `what is left is mostly a bow: ${bowDeg > 0 ? "toe-in" : "toe-out"} at both ends.`,
         detail,
       };
     case "rest":
-      return { lead: "What is left is neither a slope nor a bow.", detail };
+      return { lead: "what is left is neither a slope nor a bow.", detail };
   }
 }

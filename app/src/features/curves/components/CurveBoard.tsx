@@ -65,7 +65,7 @@ export function CurveBoard(props: CurveBoardProps) {
               quantity={quantity}
               sweep={sweeps[0] as HeightSweep}
               earlier={before[0] ?? NO_SWEEPS}
-              grow={at === 0 ? 2.2 : 1}
+              grow={at === 0 ? 1.5 : 1}
               minWidth={at === 0 ? 150 : 104}
               roomy={at === 0}
             />

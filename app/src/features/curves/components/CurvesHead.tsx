@@ -14,7 +14,8 @@ import { ToeChoice } from "./ToeChoice.tsx";
 interface CurvesHeadProps {
   readonly heights: readonly RideHeight[];
   readonly reading: Reading;
-  readonly onToe: (toe: ToeDisplay) => void;
+  /** Absent where the choice stands elsewhere. */
+  readonly onToe?: (toe: ToeDisplay) => void;
   /** What is shown where there is room for one quantity only. */
   readonly quantity: Quantity;
   readonly onQuantity: (quantity: Quantity) => void;
@@ -30,7 +31,6 @@ export function CurvesHead({ heights, reading, onToe, quantity, onQuantity }: Cu
     caster: capitalise(reading.words.caster),
     track: "Track",
   };
-  const hasToe = isWide || quantity === "toe";
   return (
     <View style={styles.head}>
       <HeightChoice heights={heights} withAll />
@@ -44,7 +44,7 @@ export function CurvesHead({ heights, reading, onToe, quantity, onQuantity }: Cu
           onChange={onQuantity}
         />
       ) : null}
-      {hasToe ? <ToeChoice reading={reading} onChoose={onToe} /> : null}
+      {onToe ? <ToeChoice reading={reading} onChoose={onToe} /> : null}
     </View>
   );
 }

@@ -1,11 +1,11 @@
 import { StyleSheet, View } from "react-native";
-import { formatAngle, formatAngleGradient } from "@/lib/format.ts";
+import { formatAngleGradient } from "@/lib/format.ts";
 import { HiddenText } from "@/ui/HiddenText.tsx";
 import { Figure, Text } from "@/ui/Text.tsx";
 import { color, space } from "@/ui/theme/tokens.ts";
 import type { HeightFigures } from "../series/figures.ts";
 import type { Reading } from "../series/panels.ts";
-import { formatToe, toeShown } from "../series/toeDisplay.ts";
+import { formatToeAngle } from "../series/toeDisplay.ts";
 import { VerdictText } from "./VerdictText.tsx";
 
 interface FiguresOfHeightProps {
@@ -19,17 +19,17 @@ interface FiguresOfHeightProps {
 /** Bump steer of one ride height in figures: how far it swings, its worst, its slope, and whether that will do. */
 export function FiguresOfHeight({ figures, before, reading, isChosen }: FiguresOfHeightProps) {
   const { height, judgement } = figures;
-  const { units, toe } = reading;
-  const angle = (deg: number | null) =>
-    deg === null || toe.as === "degrees"
-      ? formatAngle(deg, { decimals: 3 })
-      : formatToe(toeShown(deg, toe), toe, { units });
+  const { units } = reading;
+  const angle = (deg: number | null) => formatToeAngle(deg, reading);
   const gradient = (rate: number | null) => formatAngleGradient(rate, units, "always");
   return (
     <View role="group" aria-label={`Bump steer at ${height.name}`} style={styles.group}>
-      <Text variant="strong" tone={isChosen ? "dye" : "ink"} style={styles.name}>
-        {height.name}
-      </Text>
+      <View style={styles.head}>
+        <Text variant="strong" tone={isChosen ? "dye" : "ink"}>
+          {height.name}
+        </Text>
+        {judgement ? <VerdictText judgement={judgement} units={units} /> : null}
+      </View>
       <View style={styles.figures}>
         <Item
           label="Peak to peak"
@@ -42,22 +42,15 @@ export function FiguresOfHeight({ figures, before, reading, isChosen }: FiguresO
           now={gradient(figures.gradientDegPerMm)}
           before={before && gradient(before.gradientDegPerMm)}
         />
-        {judgement ? (
-          <View style={styles.item}>
-            <Text variant="label" tone="inkSoft">
-              Target
-            </Text>
-            <VerdictText judgement={judgement} units={units} />
-          </View>
-        ) : null}
       </View>
     </View>
   );
 }
 
+/** In bump. */
 function wayOf(gradient: number | null): string {
   if (gradient === null || gradient === 0) return "none";
-  return gradient > 0 ? "toe-in in bump" : "toe-out in bump";
+  return gradient > 0 ? "toe-in" : "toe-out";
 }
 
 function Item({ label, now, before }: { label: string; now: string; before: string | null | undefined }) {
@@ -81,9 +74,9 @@ function Item({ label, now, before }: { label: string; now: string; before: stri
 
 const styles = StyleSheet.create({
   group: { gap: space.xs, paddingVertical: space.s, borderTopWidth: 1, borderTopColor: color.rule },
-  name: {},
-  figures: { flexDirection: "row", flexWrap: "wrap", columnGap: space.xl, rowGap: space.s },
-  item: { gap: space.hair, minWidth: 100 },
+  head: { flexDirection: "row", flexWrap: "wrap", justifyContent: "space-between", columnGap: space.m },
+  figures: { flexDirection: "row", columnGap: space.m },
+  item: { flex: 1, gap: space.hair, minWidth: 0 },
   values: { flexDirection: "row", alignItems: "baseline", gap: space.s, flexWrap: "wrap" },
   struck: { textDecorationLine: "line-through" },
 });

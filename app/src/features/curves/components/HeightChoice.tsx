@@ -33,7 +33,7 @@ export function HeightChoice({ heights, withAll }: HeightChoiceProps) {
       </View>
     );
   }
-  const options = heights.map((height, at) => ({ value: String(at), label: height.name }));
+  const options = heights.map((height, at) => ({ value: String(at), label: unbroken(height.name) }));
   if (withAll) options.push({ value: ALL, label: "All" });
   const choose = (value: string) => {
     if (value === ALL) return store.change({ isEveryHeight: true });
@@ -46,9 +46,22 @@ export function HeightChoice({ heights, withAll }: HeightChoiceProps) {
     onChange: choose,
   };
   const isShort = options.reduce((letters, { label }) => letters + label.length, 0) <= SHORT;
-  return isShort ? <Choice {...common} hideLabel compact /> : <Select {...common} hideLabel />;
+  return (
+    <View style={styles.row}>
+      <Text variant="label" tone="inkSoft" aria-hidden>
+        Ride height
+      </Text>
+      {isShort ? <Choice {...common} hideLabel compact /> : <Select {...common} hideLabel />}
+    </View>
+  );
+}
+
+/** Side by side, a name of two words stays on one line. */
+function unbroken(name: string): string {
+  return name.replaceAll(" ", "\u00a0");
 }
 
 const styles = StyleSheet.create({
   only: { flexDirection: "row", alignItems: "center", gap: space.s, minHeight: 44 },
+  row: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", gap: space.s },
 });

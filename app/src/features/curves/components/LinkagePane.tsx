@@ -18,21 +18,24 @@ interface LinkagePaneProps {
   readonly onPick?: (hardpoint: string) => void;
   /** In pixels; without it the picture fills its parent. */
   readonly height?: number;
+  /** False leaves the steer handle out, where room is dear. */
+  readonly steerable?: boolean;
 }
 
 /** The linkage as the pose has it, with the handle that steers it. */
 export const LinkagePane = memo(function LinkagePane(props: LinkagePaneProps) {
-  const { axle, heights, units, highlight = null, onPick, height } = props;
+  const { axle, heights, units, highlight = null, onPick, height, steerable = true } = props;
   const name = usePose((pose) => pose.height);
   const travel = usePose((pose) => pose.travel);
   const steer = usePose((pose) => pose.steer);
   const { wheelUp, band } = chooseHeight(heights, name);
   const lock = steeringLock(axle.steering);
+  const hasHandle = steerable && lock > 0;
   const ghosts = useMemo(() => band.map((end) => wheelUp + end), [band, wheelUp]);
   const wheelTravel = useMemo(() => ({ left: wheelUp + travel, right: wheelUp + travel }), [wheelUp, travel]);
   const faults = useKnownFaults();
   return (
-    <View style={height === undefined ? styles.fill : { height: height + HANDLE_ROOM }}>
+    <View style={height === undefined ? styles.fill : { height: height + (hasHandle ? HANDLE_ROOM : 0) }}>
       <View style={styles.picture}>
         <LinkageView
           axle={axle}
@@ -45,9 +48,11 @@ export const LinkagePane = memo(function LinkagePane(props: LinkagePaneProps) {
           {...(onPick && { onPick })}
         />
       </View>
-      <View style={lock > 0 ? styles.handle : null}>
-        <SteerHandle axle={axle} units={units} />
-      </View>
+      {hasHandle ? (
+        <View style={styles.handle}>
+          <SteerHandle axle={axle} units={units} />
+        </View>
+      ) : null}
     </View>
   );
 });

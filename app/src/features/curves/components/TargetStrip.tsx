@@ -40,20 +40,21 @@ export const TargetStrip = memo(function TargetStrip({ bench, reading }: TargetS
           <Text variant="label" tone="inkSoft">
             {quantityName(judgement.target.quantity, words)}
           </Text>
-          <Figure>{formatQuantity(judgement.target.quantity, judgement.value, units)}</Figure>
+          <View style={styles.value}>
+            <Figure>{formatQuantity(judgement.target.quantity, judgement.value, units)}</Figure>
+            <Text variant="small" tone="inkSoft">
+              {whereOf(judgement)}
+            </Text>
+          </View>
           <VerdictText judgement={judgement} units={units} />
-          <Text variant="small" tone="inkSoft">
-            {whereOf(judgement, heights.length)}
-          </Text>
         </View>
       ))}
     </View>
   );
 });
 
-function whereOf({ height, side }: Judgement, count: number): string {
-  const where = count > 1 ? [`worst at ${height}`] : [height];
-  return side === null ? where.join("") : [...where, side].join(", ");
+function whereOf({ height, side }: Judgement): string {
+  return side === null ? height : `${height}, ${side}`;
 }
 
 const styles = StyleSheet.create({
@@ -76,5 +77,6 @@ const styles = StyleSheet.create({
     borderRightWidth: 1,
     borderRightColor: color.rule,
   },
-  wideTile: { minWidth: 170, maxWidth: 300 },
+  wideTile: { minWidth: 170 },
+  value: { flexDirection: "row", flexWrap: "wrap", alignItems: "baseline", columnGap: space.s },
 });

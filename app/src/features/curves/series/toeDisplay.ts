@@ -33,6 +33,16 @@ export function formatToe(
   return formatLength(shown, units, { decimals: lengthDecimals(units), ...style });
 }
 
+/** An angle of toe as figures tell it: finer than a curve's read-out. */
+export function formatToeAngle(
+  deg: number | null,
+  { toe, units }: { readonly toe: ToeDisplay; readonly units: LengthUnit },
+): string {
+  return deg === null || toe.as === "degrees"
+    ? formatAngle(deg, { decimals: 3 })
+    : formatToe(toeShown(deg, toe), toe, { units });
+}
+
 /** The unit with its diameter, as it stands at the head of a scale. */
 export function toeUnit(display: ToeDisplay, units: LengthUnit): string {
   if (display.as === "degrees") return "degrees";

@@ -76,9 +76,15 @@ export function quantityUnit(quantity: TargetQuantity, units: LengthUnit): strin
 /** "±0.15°", "4.50° to 5.50°", "at least 30 %". */
 export function boundsInWords({ quantity, min, max }: Target, units: LengthUnit): string {
   const text = (value: number) => formatBound(quantity, value, units);
-  if (min !== null && max !== null) return min === -max ? `±${text(max)}` : `${text(min)} to ${text(max)}`;
+  if (min !== null && max !== null)
+    return min === -max ? `±${text(max)}` : rangeInWords(text(min), text(max));
   if (min !== null) return `at least ${text(min)}`;
   return max === null ? NO_VALUE : `at most ${text(max)}`;
+}
+
+/** A unit that stands apart from its figure is told once. */
+function rangeInWords(least: string, most: string): string {
+  return `${least.split(" ")[0]} to ${most}`;
 }
 
 function formatBound(quantity: TargetQuantity, value: number, units: LengthUnit): string {

@@ -51,7 +51,7 @@ test("what an axle does not have cannot be judged", () => {
 test("bounds and verdicts are told in words and in the reader's units", () => {
   expect(boundsInWords(bump, "mm")).toBe("±0.15°");
   expect(boundsInWords(camber, "mm")).toBe("at least −1.00°");
-  expect(boundsInWords({ quantity: "track", min: 1270, max: 1295.4 }, "inch")).toBe("50.000 in to 51.000 in");
+  expect(boundsInWords({ quantity: "track", min: 1270, max: 1295.4 }, "inch")).toBe("50.000 to 51.000 in");
   expect(verdictInWords(judge(bump, { value: 0.1, side: "left" }, "Road"), "mm")).toBe("inside ±0.15°");
   expect(verdictInWords(judge(bump, { value: -0.22, side: "left" }, "Road"), "mm")).toBe("outside by 0.070°");
   expect(verdictInWords(judge(camber, { value: -1.5, side: "left" }, "Road"), "mm")).toBe("below by 0.50°");

@@ -10,7 +10,6 @@ import {
   heightFigures,
   type Quantity,
   type Reading,
-  StartingTargets,
   useLastRevision,
   usePose,
 } from "@/features/curves/index.ts";
@@ -18,16 +17,19 @@ import { space } from "@/ui/theme/tokens.ts";
 import type { FlattenBench } from "../useFlatten.ts";
 import { LeftoverNote } from "./LeftoverNote.tsx";
 
-interface FlattenCurvesProps {
+interface PartProps {
   readonly bench: Bench;
   readonly flatten: FlattenBench;
   readonly reading: Reading;
+}
+
+interface FlattenCurvesProps extends PartProps {
   readonly quantities: readonly Quantity[];
   /** In pixels; without it the board takes the room there is. */
   readonly height?: number;
 }
 
-/** The curve before, faint, and after; and both in figures. */
+/** The curve before, faint, and after. */
 export function FlattenCurves({ bench, flatten, reading, quantities, height }: FlattenCurvesProps) {
   const { heights, targets, range } = bench;
   const { axle, moved } = flatten;
@@ -52,37 +54,48 @@ export function FlattenCurves({ bench, flatten, reading, quantities, height }: F
           {...(height === undefined ? {} : { height })}
         />
       </View>
-      <Comparison bench={bench} flatten={flatten} reading={reading} />
-      <StartingTargets units={reading.units} />
     </View>
   );
 }
 
-type ComparisonProps = Pick<FlattenCurvesProps, "bench" | "flatten" | "reading">;
+interface ComparisonProps extends PartProps {
+  /** The chosen ride height alone stands beside its curve; the others may stand further down. */
+  readonly of: "all" | "chosen" | "others";
+}
 
-/** Comes a moment later than the curve, which a drag must not wait for. */
-function Comparison({ bench, flatten, reading }: ComparisonProps) {
+/** Before and after in figures. Comes a moment later than the curve, which a drag must not wait for. */
+export function Comparison({ bench, flatten, reading, of }: ComparisonProps) {
   const { axle, heights, targets, range } = useDeferredValue(bench);
   const moved = useDeferredValue(flatten.moved);
-  const before = useMemo(
-    () => heights.map((height) => heightFigures(axle, height, targets)),
-    [axle, heights, targets],
-  );
-  const figures = useMemo(
-    () => (moved === axle ? before : heights.map((height) => heightFigures(moved, height, targets))),
-    [moved, axle, before, heights, targets],
-  );
   const chosen = chooseHeight(
     heights,
     usePose((pose) => pose.height),
   );
-  const shown = figures.find(({ height }) => height === chosen);
-  return (
-    <View style={styles.stack}>
-      <HeightsFigures axle={moved} range={range} figures={figures} before={before} reading={reading} />
-      {shown ? <LeftoverNote figures={shown} reading={reading} /> : null}
-    </View>
+  const asked = useMemo(
+    () => heights.filter((height) => of === "all" || (height === chosen) === (of === "chosen")),
+    [heights, chosen, of],
   );
+  const before = useMemo(
+    () => asked.map((height) => heightFigures(axle, height, targets)),
+    [axle, asked, targets],
+  );
+  const figures = useMemo(
+    () => (moved === axle ? before : asked.map((height) => heightFigures(moved, height, targets))),
+    [moved, axle, before, asked, targets],
+  );
+  return <HeightsFigures axle={moved} range={range} figures={figures} before={before} reading={reading} />;
+}
+
+/** What is left at the chosen ride height. */
+export function Leftover({ bench, flatten, reading }: PartProps) {
+  const { heights, targets } = useDeferredValue(bench);
+  const moved = useDeferredValue(flatten.moved);
+  const chosen = chooseHeight(
+    heights,
+    usePose((pose) => pose.height),
+  );
+  const figures = useMemo(() => heightFigures(moved, chosen, targets), [moved, chosen, targets]);
+  return <LeftoverNote figures={figures} reading={reading} />;
 }
 
 const styles = StyleSheet.create({

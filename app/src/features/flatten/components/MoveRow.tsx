@@ -1,6 +1,7 @@
 import type { LengthUnit } from "@linkwright/contract";
 import type { Dispatch } from "react";
 import { StyleSheet, View } from "react-native";
+import { StepperRow } from "@/features/points/index.ts";
 import { formatLength, lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "@/lib/format.ts";
 import { Checkbox } from "@/ui/Checkbox.tsx";
 import { DomInput } from "@/ui/dom.tsx";
@@ -31,9 +32,9 @@ export function MoveRow(props: MoveRowProps) {
   const isBarred = whyNot !== null;
   return (
     <View role="group" aria-label={name} style={styles.row}>
-      <NumberField
+      <StepperRow
         label={name}
-        help={whyNot ?? help}
+        {...(isBarred ? {} : { help })}
         value={isBarred ? 0 : lengthFromMm(mm, units)}
         decimals={lengthDecimals(units)}
         step={step}
@@ -42,7 +43,11 @@ export function MoveRow(props: MoveRowProps) {
         disabled={isBarred}
         onCommit={(shown) => dispatch({ type: "moved", move, mm: mmFromLength(shown, units) })}
       />
-      {isBarred ? null : (
+      {isBarred ? (
+        <Text variant="small" tone="inkSoft">
+          {whyNot}
+        </Text>
+      ) : (
         <>
           <DomInput
             type="range"
@@ -85,7 +90,7 @@ function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
     <View style={styles.bounds}>
       <View style={styles.free}>
         <Checkbox
-          label={isFree ? "Search between" : "Search this too"}
+          label={isFree ? "Search from" : "Search this too"}
           isChecked={isFree}
           onChange={(next) => dispatch({ type: "freedomChanged", move, isFree: next })}
         />
@@ -94,7 +99,7 @@ function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
         <>
           {bound("low", low)}
           <Text variant="small" tone="inkSoft">
-            and
+            to
           </Text>
           {bound("high", high)}
           <Text variant="figureSmall" tone="inkSoft">
@@ -109,7 +114,7 @@ function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
 const styles = StyleSheet.create({
   row: { gap: space.xs, paddingVertical: space.m, borderTopWidth: 1, borderTopColor: color.rule },
   slide: { width: "100%", height: 32, margin: 0, accentColor: color.dye, cursor: "ew-resize" } as object,
-  bounds: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", columnGap: space.s },
+  bounds: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", columnGap: 6 },
   free: { flexGrow: 1 },
-  bound: { width: 72, borderWidth: 1, borderColor: color.rule },
+  bound: { width: 66, borderWidth: 1, borderColor: color.rule },
 });

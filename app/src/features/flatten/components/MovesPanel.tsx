@@ -18,10 +18,12 @@ export function MovesPanel({ bench, reading }: { bench: FlattenBench; reading: R
   const [step, chooseStep] = useStep(units);
   return (
     <View style={styles.panel}>
-      <Heading level={2} variant="block">
-        Moves
-      </Heading>
-      <StepChoice units={units} step={step} onChoose={chooseStep} />
+      <View style={styles.head}>
+        <Heading level={2} variant="block">
+          Moves
+        </Heading>
+        <StepChoice units={units} step={step} onChoose={chooseStep} />
+      </View>
       <View>
         {OFFERED_MOVES.map((move) => (
           <MoveRow
@@ -47,4 +49,7 @@ export function MovesPanel({ bench, reading }: { bench: FlattenBench; reading: R
   );
 }
 
-const styles = StyleSheet.create({ panel: { gap: space.s } });
+const styles = StyleSheet.create({
+  panel: { gap: space.s },
+  head: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", justifyContent: "space-between" },
+});

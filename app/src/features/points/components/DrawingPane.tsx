@@ -55,6 +55,7 @@ function Points({ place, units }: DrawingPaneProps) {
     <>
       <View style={styles.table}>
         <SideBar />
+        {mayEdit ? <StepChoice units={units} step={step} onChoose={chooseStep} /> : null}
         <PointTable
           groups={groups}
           selected={chosen?.path ?? null}
@@ -68,7 +69,6 @@ function Points({ place, units }: DrawingPaneProps) {
       </View>
       {mayEdit ? (
         <View style={styles.editor}>
-          <StepChoice units={units} step={step} onChoose={chooseStep} />
           {chosen ? (
             <>
               <Heading level={2} variant="block">
@@ -110,18 +110,24 @@ function Setup({ units }: { units: LengthUnit }) {
 }
 
 const styles = StyleSheet.create({
-  pane: { flexGrow: 1, backgroundColor: color.panel },
+  pane: { flex: 1, minHeight: 420, backgroundColor: color.panel },
   top: { padding: space.l, paddingBottom: space.s, gap: space.m },
-  table: { paddingHorizontal: space.l, paddingBottom: space.l, gap: space.s, flexGrow: 1 },
+  table: {
+    flex: 1,
+    minHeight: 160,
+    overflowY: "auto",
+    paddingHorizontal: space.l,
+    paddingBottom: space.l,
+    gap: space.s,
+  } as object,
   editor: {
-    position: "sticky",
-    bottom: 0,
-    gap: space.m,
-    padding: space.l,
+    gap: space.s,
+    paddingHorizontal: space.l,
+    paddingVertical: space.m,
     backgroundColor: color.panel,
     borderTopWidth: 1,
     borderTopColor: color.rule,
-  } as object,
-  setup: { paddingHorizontal: space.l, paddingBottom: space.xl },
+  },
+  setup: { flex: 1, overflowY: "auto", paddingHorizontal: space.l, paddingBottom: space.xl } as object,
   section: { gap: space.m, paddingVertical: space.l, borderTopWidth: 1, borderTopColor: color.rule },
 });

@@ -4,7 +4,7 @@ import { usePreferences } from "@/features/session/index.ts";
 import { groupInWords, useStudy } from "@/features/study/index.ts";
 import { Button } from "@/ui/Button.tsx";
 import { Heading } from "@/ui/Heading.tsx";
-import { space } from "@/ui/theme/tokens.ts";
+import { color, space } from "@/ui/theme/tokens.ts";
 import { useStep } from "../entry/useStep.ts";
 import { SetupSection } from "../setup/SetupSection.tsx";
 import { SECTIONS, type SectionId } from "../setup/sections.ts";
@@ -34,7 +34,7 @@ export function PhonePoints({ bench, reading }: PhonePointsProps) {
   );
 }
 
-const PICTURE = 250;
+const PICTURE = 240;
 
 function OnePoint({ bench, reading, place }: PhonePointsProps & { place: Place }) {
   const { units } = reading;
@@ -48,6 +48,23 @@ function OnePoint({ bench, reading, place }: PhonePointsProps & { place: Place }
   const last = rows[(at + rows.length - 1) % rows.length] ?? chosen;
   return (
     <View>
+      <View style={styles.bar}>
+        <Button kind="quiet" label="All points" onPress={place.openList} />
+        <View style={styles.pair}>
+          <Button
+            kind="quiet"
+            label="Previous"
+            accessibleLabel={`Previous point: ${groupInWords(last.group, words)}, ${last.label}`}
+            onPress={() => place.openPoint(last.path)}
+          />
+          <Button
+            kind="quiet"
+            label="Next"
+            accessibleLabel={`Next point: ${groupInWords(next.group, words)}, ${next.label}`}
+            onPress={() => place.openPoint(next.path)}
+          />
+        </View>
+      </View>
       {bench ? (
         <LinkagePane
           axle={bench.axle}
@@ -56,25 +73,11 @@ function OnePoint({ bench, reading, place }: PhonePointsProps & { place: Place }
           highlight={place.point}
           onPick={place.openPoint}
           height={PICTURE}
+          steerable={false}
         />
       ) : null}
-      <View style={styles.page}>
-        <View style={styles.row}>
-          <Button label="All points" onPress={place.openList} />
-          <View style={styles.pair}>
-            <Button
-              label="‹"
-              accessibleLabel={`Previous point: ${last.group}, ${last.label}`}
-              onPress={() => place.openPoint(last.path)}
-            />
-            <Button
-              label="›"
-              accessibleLabel={`Next point: ${next.group}, ${next.label}`}
-              onPress={() => place.openPoint(next.path)}
-            />
-          </View>
-        </View>
-        <Heading level={2}>{`${groupInWords(chosen.group, words)}, ${chosen.label}`}</Heading>
+      <View style={styles.point}>
+        <Heading level={2} variant="block">{`${groupInWords(chosen.group, words)}, ${chosen.label}`}</Heading>
         <ReadOnlyNote />
         {bench ? <BumpSteerLine bench={bench} reading={reading} /> : null}
         {mayEdit ? <StepChoice units={units} step={step} onChoose={chooseStep} /> : null}
@@ -110,7 +113,8 @@ function OneSection({ section, reading, place }: OneSectionProps) {
 
 const styles = StyleSheet.create({
   page: { padding: space.l, gap: space.l },
-  row: { flexDirection: "row", justifyContent: "space-between" },
-  pair: { flexDirection: "row", gap: space.s },
+  point: { paddingHorizontal: space.l, paddingVertical: space.m, gap: space.m },
+  bar: { flexDirection: "row", justifyContent: "space-between", backgroundColor: color.panel },
+  pair: { flexDirection: "row" },
   back: { alignSelf: "flex-start" },
 });

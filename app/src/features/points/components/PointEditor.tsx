@@ -2,10 +2,10 @@ import type { LengthUnit } from "@linkwright/contract";
 import { StyleSheet, View } from "react-native";
 import { lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "@/lib/format.ts";
 import { Button } from "@/ui/Button.tsx";
-import { NumberField } from "@/ui/NumberField.tsx";
 import { space } from "@/ui/theme/tokens.ts";
 import { AXES, AXIS_NAMES, fieldOf, type PointRow } from "../entry/rows.ts";
 import type { PointHandlers } from "./PointTableRow.tsx";
+import { StepperRow } from "./StepperRow.tsx";
 
 interface PointEditorProps extends Pick<PointHandlers, "onEnter" | "onPutBack"> {
   readonly row: PointRow;
@@ -21,7 +21,7 @@ export function PointEditor({ row, units, step, isLocked, onEnter, onPutBack }: 
   return (
     <View style={styles.fields}>
       {AXES.map((axis) => (
-        <NumberField
+        <StepperRow
           // A draft typed into one point must not turn up in the next.
           key={fieldOf(row.path, axis)}
           label={AXIS_NAMES[axis]}
@@ -39,4 +39,4 @@ export function PointEditor({ row, units, step, isLocked, onEnter, onPutBack }: 
   );
 }
 
-const styles = StyleSheet.create({ fields: { gap: space.m } });
+const styles = StyleSheet.create({ fields: { gap: space.s } });

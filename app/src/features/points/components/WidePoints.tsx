@@ -27,7 +27,7 @@ export function WidePoints({ bench, reading }: WidePointsProps) {
   const drawing = {
     id: "drawing",
     label: "Drawing",
-    size: 28,
+    size: 26,
     minSize: 330,
     content: <DrawingPane place={place} units={reading.units} />,
   };
@@ -37,14 +37,14 @@ export function WidePoints({ bench, reading }: WidePointsProps) {
     {
       id: "picture",
       label: "Linkage",
-      size: 31,
+      size: 27,
       minSize: 260,
       content: <Picture bench={bench} reading={reading} place={place} />,
     },
     {
       id: "curves",
       label: "Curves",
-      size: 41,
+      size: 47,
       minSize: 400,
       content: <CurvesPane bench={bench} reading={reading} />,
     },

@@ -3,9 +3,9 @@ import type { Coordinates, Path } from "@linkwright/kinematics";
 import { StyleSheet, View } from "react-native";
 import { useStudy } from "@/features/study/index.ts";
 import { Button } from "@/ui/Button.tsx";
-import { NumberField } from "@/ui/NumberField.tsx";
 import { Text } from "@/ui/Text.tsx";
 import { space } from "@/ui/theme/tokens.ts";
+import { StepperRow } from "../components/StepperRow.tsx";
 import { keptAt } from "../entry/attempt.ts";
 import { useEntry } from "../entry/EntryProvider.tsx";
 import { AXES, AXIS_NAMES, fieldOf, withCoordinate } from "../entry/rows.ts";
@@ -32,7 +32,7 @@ export function DirectionField({ path, label, help }: DirectionFieldProps) {
         {help}
       </Text>
       {AXES.map((axis) => (
-        <NumberField
+        <StepperRow
           key={axis}
           label={AXIS_NAMES[axis]}
           value={direction[axis]}

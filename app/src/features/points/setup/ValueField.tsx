@@ -3,8 +3,8 @@ import type { Path } from "@linkwright/kinematics";
 import { StyleSheet, View } from "react-native";
 import { useStudy } from "@/features/study/index.ts";
 import { Button } from "@/ui/Button.tsx";
-import { NumberField } from "@/ui/NumberField.tsx";
 import { space } from "@/ui/theme/tokens.ts";
+import { StepperRow } from "../components/StepperRow.tsx";
 import { keptAt } from "../entry/attempt.ts";
 import { useEntry } from "../entry/EntryProvider.tsx";
 import { decimalsFor, type FieldKind, shownFrom, stepFor, unitFor, valueFrom } from "../form/fieldKinds.ts";
@@ -30,7 +30,7 @@ export function ValueField({ path, label, help, kind, units, optional }: ValueFi
   const field = path.join(".");
   return (
     <View style={styles.field}>
-      <NumberField
+      <StepperRow
         label={label}
         help={help}
         value={value === undefined ? null : shownFrom(value, kind, units)}
