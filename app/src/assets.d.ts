@@ -1,4 +1,5 @@
+/** The bundler answers the address that the file is served from. */
 declare module "*.woff2" {
-  const asset: { readonly uri: string };
-  export default asset;
+  const address: string;
+  export default address;
 }

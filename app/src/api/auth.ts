@@ -7,18 +7,31 @@ import {
 } from "@linkwright/contract";
 import { type QueryClient, queryOptions, useMutation, useQueryClient } from "@tanstack/react-query";
 import { isProblem } from "@/lib/problem.ts";
+import { readStored, removeStored, writeStored } from "@/lib/storage.ts";
 import { callApi } from "./client.ts";
 
 const ME = ["me"] as const;
+
+const SIGNED_IN_KEY = "linkwright.signedIn";
+
+/** Whether this browser has a session as far as it remembers: a visitor's pages then need not ask. */
+export function remembersSession(): boolean {
+  return readStored(SIGNED_IN_KEY) !== null;
+}
 
 /** Null when nobody is signed in: an answer, not an error. */
 export const meQuery = queryOptions({
   queryKey: ME,
   queryFn: async ({ signal }): Promise<Me | null> => {
     try {
-      return await callApi(authRoutes.me, { params: {}, signal });
+      const me = await callApi(authRoutes.me, { params: {}, signal });
+      writeStored(SIGNED_IN_KEY, "yes");
+      return me;
     } catch (error) {
-      if (isProblem(error, "not_signed_in")) return null;
+      if (isProblem(error, "not_signed_in")) {
+        removeStored(SIGNED_IN_KEY);
+        return null;
+      }
       throw error;
     }
   },
@@ -41,6 +54,7 @@ export function useSignIn() {
     onSuccess: (me) => {
       // Whatever another person had loaded on this device goes first.
       forgetAllButMe(client);
+      writeStored(SIGNED_IN_KEY, "yes");
       client.setQueryData(ME, me);
     },
   });
@@ -51,6 +65,7 @@ export function useSignOut() {
   return useMutation({
     mutationFn: () => callApi(authRoutes.signOut, { params: {} }),
     onSuccess: () => {
+      removeStored(SIGNED_IN_KEY);
       client.setQueryData(ME, null);
       forgetAllButMe(client);
     },

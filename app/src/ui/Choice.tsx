@@ -37,6 +37,7 @@ export function Choice<Value extends string>({
               style={[
                 compact ? type.small : type.body,
                 styles.option,
+                compact && styles.compactOption,
                 index > 0 && styles.divided,
                 isChosen && styles.chosen,
               ]}
@@ -82,6 +83,7 @@ const styles = StyleSheet.create({
     boxSizing: "border-box",
     position: "relative",
   } as object,
+  compactOption: { flexBasis: "auto", flexShrink: 0, whiteSpace: "nowrap" } as object,
   divided: { borderLeftWidth: 1, borderLeftStyle: "solid", borderLeftColor: color.rule } as object,
   chosen: { backgroundColor: color.dye, color: color.onDye, fontWeight: "600" },
 });

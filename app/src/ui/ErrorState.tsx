@@ -17,20 +17,28 @@ interface ErrorStateProps {
 /** What went wrong, where, and what to do about it. */
 export function ErrorState({ title, error, onRetry, actions }: ErrorStateProps) {
   const { detail, advice, reference } = explain(error);
-  const retry = onRetry ? <Button label="Try again" busyLabel="Trying…" onPress={onRetry} /> : null;
+  // What is not there, or not for this person, will not be so in a moment either.
+  const isFinal = isProblem(error, "not_found", "not_allowed");
+  const retry =
+    onRetry && !isFinal ? <Button label="Try again" busyLabel="Trying…" onPress={onRetry} /> : null;
   return (
     <Notice
       kind="fault"
       live
       title={title}
       actions={
-        retry || actions ? [<View key="retry">{retry}</View>, <View key="more">{actions}</View>] : null
+        retry || actions ? (
+          <>
+            {retry}
+            {actions}
+          </>
+        ) : null
       }
     >
       <Text>{detail}</Text>
       <IssueList error={error} />
       {advice ? <Text>{advice}</Text> : null}
-      {reference ? (
+      {reference && !isFinal ? (
         <Text variant="figureSmall" tone="inkSoft">
           {`Reference ${reference}`}
         </Text>

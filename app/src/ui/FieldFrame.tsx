@@ -52,7 +52,7 @@ export function FieldFrame({ label, help, error, hideLabel, children }: Props) {
 /** Always in the page, so that a screen reader hears the message arrive. */
 export function FieldError({ id, message }: { id: string; message: string | undefined }) {
   return (
-    <View nativeID={id} aria-live="polite" style={message ? styles.error : null}>
+    <View nativeID={id} aria-live="polite" style={message ? styles.error : styles.noError}>
       {message ? (
         <>
           <Sign kind="fault" size={16} />
@@ -69,5 +69,7 @@ const styles = StyleSheet.create({
   field: { gap: space.xs },
   label: { color: color.ink, display: "flex" },
   error: { flexDirection: "row", gap: space.xs + 2, alignItems: "flex-start", paddingTop: space.hair },
+  // Takes back the gap that it would add while it is empty.
+  noError: { marginTop: -space.xs },
   message: { flex: 1 },
 });

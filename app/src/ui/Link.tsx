@@ -1,22 +1,27 @@
-import { type Href, Link as RouterLink } from "expo-router";
-import type { ReactNode } from "react";
-import { Pressable, type StyleProp, StyleSheet, type ViewStyle } from "react-native";
+import { type Href, Link as RouterLink, useRouter } from "expo-router";
+import type { MouseEvent, ReactNode } from "react";
+import { type StyleProp, StyleSheet, type ViewStyle } from "react-native";
 import type { ButtonKind } from "./Button.tsx";
-import { cssClass } from "./dom.tsx";
+import { DomAnchor } from "./dom.tsx";
 import { Text } from "./Text.tsx";
 import { type ColorName, color, corner, space, type TypeName, touch, type } from "./theme/tokens.ts";
 
 interface LinkProps {
   readonly href: Href;
   readonly children: ReactNode;
+  /** Not within a sentence: then it is as high as a thumb needs. */
+  readonly standalone?: boolean;
   readonly variant?: TypeName;
   readonly tone?: ColorName;
 }
 
 /** A link within or after text. */
-export function Link({ href, children, variant = "body", tone = "dye" }: LinkProps) {
+export function Link({ href, children, standalone, variant = "body", tone = "dye" }: LinkProps) {
   return (
-    <RouterLink href={href} style={[type[variant], styles.inline, { color: color[tone] }]}>
+    <RouterLink
+      href={href}
+      style={[type[variant], styles.inline, standalone && styles.standalone, { color: color[tone] }]}
+    >
       {children}
     </RouterLink>
   );
@@ -31,7 +36,14 @@ interface BlockLinkProps {
   readonly isCurrent?: boolean;
 }
 
-/** A whole block that leads somewhere; its accessible name is its text unless `label` is given. */
+function isPlainClick(event: MouseEvent): boolean {
+  return event.button === 0 && !(event.metaKey || event.ctrlKey || event.shiftKey || event.altKey);
+}
+
+/**
+ * A whole block that leads somewhere; its accessible name is its text unless `label` is given. An anchor of our own,
+ * because the router's link is a text and its `asChild` spreads style arrays into objects.
+ */
 export function BlockLink({
   href,
   children,
@@ -40,13 +52,22 @@ export function BlockLink({
   className = "block-link",
   isCurrent,
 }: BlockLinkProps) {
-  const current = isCurrent ? { "aria-current": "page" as const } : {};
+  const router = useRouter();
   return (
-    <RouterLink href={href} asChild>
-      <Pressable aria-label={label} style={[cssClass(className), style]} {...current}>
-        {children}
-      </Pressable>
-    </RouterLink>
+    <DomAnchor
+      href={RouterLink.resolveHref(href)}
+      aria-label={label}
+      aria-current={isCurrent ? "page" : undefined}
+      className={className}
+      onClick={(event) => {
+        if (event.defaultPrevented || !isPlainClick(event)) return;
+        event.preventDefault();
+        router.navigate(href);
+      }}
+      style={[styles.block, style]}
+    >
+      {children}
+    </DomAnchor>
   );
 }
 
@@ -85,6 +106,23 @@ export function LinkButton({
 
 const styles = StyleSheet.create({
   inline: { textDecorationLine: "underline", textUnderlineOffset: 3 } as object,
+  standalone: {
+    display: "inline-flex",
+    alignItems: "center",
+    minHeight: touch,
+    alignSelf: "flex-start",
+  } as object,
+  // What a View is by default.
+  block: {
+    display: "flex",
+    flexDirection: "column",
+    boxSizing: "border-box",
+    minWidth: 0,
+    borderWidth: 0,
+    borderStyle: "solid",
+    textDecorationLine: "none",
+    cursor: "pointer",
+  } as object,
   button: {
     minHeight: touch,
     paddingHorizontal: space.l,

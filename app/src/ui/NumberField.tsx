@@ -1,13 +1,13 @@
-import { type KeyboardEvent, type Ref, useRef } from "react";
+import type { KeyboardEvent, Ref } from "react";
 import { StyleSheet, View } from "react-native";
 import { control } from "./controlStyles.ts";
-import { DomButton, DomInput } from "./dom.tsx";
+import { DomInput } from "./dom.tsx";
 import { FieldFrame, type FieldFrameProps } from "./FieldFrame.tsx";
+import { StepButton } from "./StepButton.tsx";
 import { Text } from "./Text.tsx";
 import { color, corner, space, touch, type } from "./theme/tokens.ts";
 import { useMediaQuery } from "./useMediaQuery.ts";
 import { type NumberEntryOptions, useNumberEntry } from "./useNumberEntry.ts";
-import { useRepeat } from "./useRepeat.ts";
 
 interface NumberFieldProps extends FieldFrameProps, NumberEntryOptions {
   /** Without ± buttons, for dense tables on wide screens; arrow keys still step. */
@@ -114,30 +114,6 @@ export function NumberField({
   );
 }
 
-interface StepButtonProps {
-  readonly sign: "−" | "+" | "±";
-  readonly label: string;
-  readonly disabled: boolean | undefined;
-  readonly onStep: () => void;
-}
-
-function StepButton({ sign, label, disabled, onStep }: StepButtonProps) {
-  const latest = useRef(onStep);
-  latest.current = onStep;
-  const repeat = useRepeat(() => latest.current());
-  return (
-    <DomButton
-      className="stepper"
-      aria-label={label}
-      disabled={disabled}
-      {...(sign === "±" ? { onClick: onStep } : repeat)}
-      style={[type.section, styles.stepper, sign === "−" ? styles.dividedRight : styles.dividedLeft]}
-    >
-      {sign}
-    </DomButton>
-  );
-}
-
 const styles = StyleSheet.create({
   row: {
     flexDirection: "row",
@@ -161,19 +137,4 @@ const styles = StyleSheet.create({
   bareInput: { textAlign: "right", minHeight: 30, padding: 2 },
   locked: { color: color.inkSoft },
   unit: { paddingRight: space.s },
-  stepper: {
-    width: touch,
-    minHeight: touch,
-    borderWidth: 0,
-    borderStyle: "solid",
-    borderColor: color.rule,
-    backgroundColor: "transparent",
-    color: color.ink,
-    cursor: "pointer",
-    padding: 0,
-    userSelect: "none",
-    touchAction: "manipulation",
-  } as object,
-  dividedRight: { borderRightWidth: 1 },
-  dividedLeft: { borderLeftWidth: 1 },
 });

@@ -38,6 +38,7 @@ const styles = StyleSheet.create({
     flexDirection: "row",
     flexWrap: "wrap",
     alignItems: "center",
+    alignContent: "center",
     gap: space.m,
     minHeight: 48,
     paddingHorizontal: space.l,

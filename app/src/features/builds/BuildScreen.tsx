@@ -2,12 +2,12 @@ import { useQuery } from "@tanstack/react-query";
 import { useState } from "react";
 import { buildQuery } from "@/api/builds.ts";
 import { studiesQuery } from "@/api/studies.ts";
-import { ShopFrame } from "@/features/frame/index.ts";
+import { ElsewhereLinks, ShopFrame } from "@/features/frame/index.ts";
 import { useWorkshop } from "@/features/session/index.ts";
 import { Button } from "@/ui/Button.tsx";
+import { Crumb } from "@/ui/Crumb.tsx";
 import { EmptyState } from "@/ui/EmptyState.tsx";
 import { ErrorState } from "@/ui/ErrorState.tsx";
-import { Link } from "@/ui/Link.tsx";
 import { Loading } from "@/ui/Loading.tsx";
 import { Page } from "@/ui/Page.tsx";
 import { BuildDialog } from "./components/BuildDialog.tsx";
@@ -26,20 +26,12 @@ export function BuildScreen({ buildId }: { buildId: string }) {
       <Page
         title={build.data?.name ?? "Build"}
         intro={build.data?.summary}
-        crumb={
-          <Link href="/builds" variant="small">
-            Builds
-          </Link>
-        }
+        crumb={<Crumb href="/builds" label="Builds" />}
         actions={
           build.data ? (
             <>
               {may("build.edit") ? (
-                <Button
-                  label="Rename"
-                  accessibleLabel="Name and description of the build"
-                  onPress={() => setOpen("rename")}
-                />
+                <Button label="Rename" accessibleLabel="Rename the build" onPress={() => setOpen("rename")} />
               ) : null}
               {may("study.edit") ? newStudy : null}
             </>
@@ -47,7 +39,12 @@ export function BuildScreen({ buildId }: { buildId: string }) {
         }
       >
         {build.error ? (
-          <ErrorState title="This build could not be opened" error={build.error} onRetry={build.refetch} />
+          <ErrorState
+            title="This build could not be opened"
+            error={build.error}
+            onRetry={build.refetch}
+            actions={<ElsewhereLinks />}
+          />
         ) : (
           <Studies buildId={buildId} />
         )}

@@ -5,7 +5,7 @@ import { Text } from "@/ui/Text.tsx";
 import { THEME_CHOICES, type ThemeChoice, useTheme } from "@/ui/theme/ThemeProvider.tsx";
 import { color, space } from "@/ui/theme/tokens.ts";
 
-const THEME_LABEL: Record<ThemeChoice, string> = { system: "As the system", light: "Light", dark: "Dark" };
+const THEME_LABEL: Record<ThemeChoice, string> = { system: "System", light: "Light", dark: "Dark" };
 const OPTIONS = THEME_CHOICES.map((value) => ({ value, label: THEME_LABEL[value] }));
 
 export function Footer() {
@@ -16,7 +16,7 @@ export function Footer() {
         <Text variant="small" tone="inkSoft">
           Geometry only: the numbers say nothing of strength, fatigue, welds, brakes or handling at the limit.
         </Text>
-        <Link href="/method" variant="small">
+        <Link href="/method" variant="small" standalone>
           Method and cautions
         </Link>
       </View>

@@ -1,7 +1,7 @@
 import { useQuery } from "@tanstack/react-query";
 import type { ReactNode } from "react";
 import { StyleSheet, View } from "react-native";
-import { meQuery } from "@/api/auth.ts";
+import { meQuery, remembersSession } from "@/api/auth.ts";
 import { BlockLink, LinkButton } from "@/ui/Link.tsx";
 import { TopBar } from "@/ui/TopBar.tsx";
 import { useIsMedium } from "@/ui/useMediaQuery.ts";
@@ -10,7 +10,7 @@ import { Footer } from "./Footer.tsx";
 
 /** Head and foot of the pages that everyone may see. */
 export function PublicFrame({ children }: { children: ReactNode }) {
-  const { data: me } = useQuery(meQuery);
+  const { data: me } = useQuery({ ...meQuery, enabled: remembersSession() });
   const isMedium = useIsMedium();
   return (
     <View style={styles.frame}>

@@ -52,7 +52,7 @@ const styles = StyleSheet.create({
     gap: 56,
   },
   words: { gap: space.l },
-  wideWords: { width: 420, flexShrink: 0 },
+  wideWords: { width: 400, flexShrink: 0 },
   smallerDisplay: { fontSize: 36, lineHeight: 40 },
   lead: { fontSize: 18, lineHeight: 28 },
   actions: { flexDirection: "row", flexWrap: "wrap", gap: space.m },

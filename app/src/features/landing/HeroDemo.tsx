@@ -9,7 +9,7 @@ import { TravelPlot } from "@/ui/rule/TravelPlot.tsx";
 import { Sign } from "@/ui/Sign.tsx";
 import { Text } from "@/ui/Text.tsx";
 import { space } from "@/ui/theme/tokens.ts";
-import { useIsMedium } from "@/ui/useMediaQuery.ts";
+import { useIsWide } from "@/ui/useMediaQuery.ts";
 import { FrontView } from "./FrontView.tsx";
 import { DEMO_TRAVEL, STREET_TARGET_DEG, useDemo } from "./useDemo.ts";
 
@@ -22,47 +22,65 @@ export function HeroDemo() {
   const [travel, setTravel] = useState(30);
   const [rackUp, setRackUp] = useState(0);
   const { units } = usePreferences();
-  const isMedium = useIsMedium();
+  const isWide = useIsWide();
   const { axle, series, worstDeg } = useDemo(rackUp);
-  return (
-    <View style={styles.demo}>
-      <FrontView axle={axle} travel={travel} />
-      <RuleStage
-        from={-DEMO_TRAVEL}
-        to={DEMO_TRAVEL}
-        travel={travel}
-        onTravel={setTravel}
-        unit={units}
-        height={isMedium ? 330 : 290}
-      >
-        <SteelRule />
-        <TravelPlot
-          title="Toe change"
-          unitLabel={isMedium ? "degrees, toe-in to the right" : "degrees"}
-          series={series}
-          band={BAND}
-          minSpan={2.4}
-          include={0}
-          format={formatToe}
-          formatTick={formatTick}
+  const plot = (
+    <RuleStage
+      from={-DEMO_TRAVEL}
+      to={DEMO_TRAVEL}
+      travel={travel}
+      onTravel={setTravel}
+      unit={units}
+      height={isWide ? 480 : 310}
+    >
+      <SteelRule />
+      <TravelPlot
+        title="Toe change"
+        unitLabel="degrees"
+        series={series}
+        band={BAND}
+        minSpan={2.4}
+        include={0}
+        format={formatToe}
+        formatTick={formatTick}
+      />
+    </RuleStage>
+  );
+  const controls = (
+    <View style={styles.controls}>
+      <View style={styles.field}>
+        <NumberField
+          label="Rack height"
+          help="+ lifts both inner joints"
+          value={rackUp}
+          decimals={0}
+          step={1}
+          unit="mm"
+          sign="always"
+          min={-15}
+          max={20}
+          onCommit={setRackUp}
         />
-      </RuleStage>
-      <View style={[styles.controls, isMedium && styles.inLine]}>
-        <View style={styles.field}>
-          <NumberField
-            label="Rack height"
-            help="+ lifts both inner joints"
-            value={rackUp}
-            decimals={0}
-            step={1}
-            unit="mm"
-            sign="always"
-            min={-15}
-            max={20}
-            onCommit={setRackUp}
-          />
-        </View>
-        <Verdict worstDeg={worstDeg} />
+      </View>
+      <Verdict worstDeg={worstDeg} />
+    </View>
+  );
+  const view = <FrontView axle={axle} travel={travel} />;
+  if (!isWide) {
+    return (
+      <View style={styles.stack}>
+        {view}
+        {plot}
+        {controls}
+      </View>
+    );
+  }
+  return (
+    <View style={styles.beside}>
+      <View style={styles.plot}>{plot}</View>
+      <View style={styles.picture}>
+        {view}
+        {controls}
       </View>
     </View>
   );
@@ -87,10 +105,18 @@ function Verdict({ worstDeg }: { worstDeg: number | null }) {
 }
 
 const styles = StyleSheet.create({
-  demo: { gap: space.l },
-  controls: { gap: space.l },
-  inLine: { flexDirection: "row", alignItems: "center", gap: space.xxl },
-  field: { width: "100%", maxWidth: 280 },
-  verdict: { flex: 1, gap: space.hair },
+  stack: { gap: space.l },
+  beside: { flexDirection: "row", gap: space.xl, alignItems: "stretch" },
+  plot: { flex: 2, minWidth: 0 },
+  picture: { flex: 3, minWidth: 0, justifyContent: "space-between", gap: space.l },
+  controls: {
+    flexDirection: "row",
+    flexWrap: "wrap",
+    alignItems: "flex-end",
+    gap: space.l,
+    columnGap: space.xxl,
+  },
+  field: { width: "100%", maxWidth: 240 },
+  verdict: { gap: space.hair, flexShrink: 0 },
   judged: { flexDirection: "row", alignItems: "center", gap: space.xs + 2 },
 });

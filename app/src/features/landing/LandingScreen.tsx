@@ -33,7 +33,9 @@ export function LandingScreen() {
             These are shown once more at sign-up, where you acknowledge them, and stand on every sheet that
             leaves the house.
           </Text>
-          <Link href="/method">How every quantity is defined, and its source</Link>
+          <Link href="/method" standalone>
+            How every quantity is defined, and its source
+          </Link>
           <View style={styles.start}>
             <LinkButton href="/sign-up" kind="primary" label="Make a workshop" />
           </View>

@@ -22,7 +22,7 @@ const DIALECTS = [
   { value: "us", label: "US" },
 ] as const;
 const THEMES = [
-  { value: "system", label: "As the system" },
+  { value: "system", label: "System" },
   { value: "light", label: "Light" },
   { value: "dark", label: "Dark" },
 ] as const;

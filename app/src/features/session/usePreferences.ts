@@ -12,7 +12,8 @@ export interface PersonPreferences {
 
 /** The person's own choice, or what their browser suggests while nobody is signed in. */
 export function usePreferences(): PersonPreferences {
-  const { data: me } = useQuery(meQuery);
+  // Reads what the frame above has loaded; asks nothing itself.
+  const { data: me } = useQuery({ ...meQuery, enabled: false });
   const dialect = me?.preferences.dialect ?? (navigator.language === "en-US" ? "us" : "uk");
   const units = me?.preferences.units ?? "mm";
   return { units, dialect, words: DIALECT_WORDS[dialect], locale: localeOf(dialect) };

@@ -1,12 +1,13 @@
 import type { StudyAnswer } from "@linkwright/contract";
 import { useQuery } from "@tanstack/react-query";
+import { Redirect } from "expo-router";
 import type { ReactNode } from "react";
 import { buildQuery } from "@/api/builds.ts";
 import { studyQuery } from "@/api/studies.ts";
-import { ShopFrame } from "@/features/frame/index.ts";
+import { ElsewhereLinks, ShopFrame } from "@/features/frame/index.ts";
 import { useCurrentPerson, useWorkshop } from "@/features/session/index.ts";
+import { Crumb } from "@/ui/Crumb.tsx";
 import { ErrorState } from "@/ui/ErrorState.tsx";
-import { Link } from "@/ui/Link.tsx";
 import { Loading } from "@/ui/Loading.tsx";
 import { Page } from "@/ui/Page.tsx";
 import { StudyFrame } from "./components/StudyFrame.tsx";
@@ -32,11 +33,20 @@ export function StudyShell({ buildId, studyId, children }: StudyShellProps) {
       </OpenStudyShell>
     );
   }
+  if (study.data) {
+    const params = { buildId: study.data.buildId, studyId };
+    return <Redirect href={{ pathname: "/builds/[buildId]/studies/[studyId]", params }} />;
+  }
   return (
     <ShopFrame>
-      <Page title="Study" crumb={<Link href="/builds">Builds</Link>}>
+      <Page title="Study" crumb={<Crumb href="/builds" label="Builds" />}>
         {study.error ? (
-          <ErrorState title="This study could not be opened" error={study.error} onRetry={study.refetch} />
+          <ErrorState
+            title="This study could not be opened"
+            error={study.error}
+            onRetry={study.refetch}
+            actions={<ElsewhereLinks />}
+          />
         ) : (
           <Loading label="Opening the study" rowHeight={120} />
         )}

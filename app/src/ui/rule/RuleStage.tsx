@@ -10,7 +10,7 @@ import { useSize } from "../useSize.ts";
 const PAD_TOP = 14;
 const PAD_BOTTOM = 30;
 /** The heads of all panels are equally high, or their axes would not stand level. */
-export const HEAD_HEIGHT = 52;
+export const HEAD_HEIGHT = 62;
 
 export interface Stage {
   readonly from: number;

@@ -129,8 +129,6 @@ const styles = StyleSheet.create({
     flexDirection: "row",
     flexWrap: "wrap",
     columnGap: space.m,
-    height: 20,
-    overflow: "hidden",
   },
   reading: { display: "flex", flexDirection: "row", alignItems: "center", gap: space.xs },
   drawing: { cursor: "ns-resize", touchAction: "pan-y" },

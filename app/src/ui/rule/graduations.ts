@@ -1,7 +1,7 @@
 // Where the marks of the steel rule stand, in either unit. Travel is mm throughout; only the marks are cut in inches.
 
 import type { LengthUnit } from "@linkwright/contract";
-import { formatNumber, lengthFromMm, mmFromLength } from "@/lib/format.ts";
+import { formatNumber, lengthFromMm, mmFromLength } from "../../lib/format.ts";
 
 export interface Graduation {
   readonly travel: number;

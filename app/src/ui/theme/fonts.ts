@@ -31,7 +31,7 @@ const FACES = [
 export function fontFaceRules(): string {
   return FACES.map(
     ([family, weight, file, range]) =>
-      `@font-face{font-family:"${family}";font-weight:${weight};font-display:swap;src:url("${file.uri}") format("woff2");unicode-range:${range}}`,
+      `@font-face{font-family:"${family}";font-weight:${weight};font-display:swap;src:url("${file}") format("woff2");unicode-range:${range}}`,
   ).join("\n");
 }
 

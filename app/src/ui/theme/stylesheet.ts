@@ -18,6 +18,7 @@ html,body{background:var(--ground);color:var(--ink)}
 a{color:inherit}
 :focus{outline:none}
 :focus-visible{outline:2px solid var(--dye)!important;outline-offset:2px}
+[tabindex="-1"]:focus-visible{outline:none!important}
 .on-steel{color-scheme:dark;${declarations(dark)}}
 ::selection{background:var(--dye);color:var(--onDye)}
 ::placeholder{color:var(--inkSoft);opacity:1}

@@ -10,7 +10,6 @@ import { useStoredText } from "@/lib/useStoredText.ts";
 import { Button } from "@/ui/Button.tsx";
 import { DomForm } from "@/ui/dom.tsx";
 import { ErrorState } from "@/ui/ErrorState.tsx";
-import { Panel } from "@/ui/Panel.tsx";
 import { Select } from "@/ui/Select.tsx";
 import { TextArea } from "@/ui/TextField.tsx";
 import { space } from "@/ui/theme/tokens.ts";
@@ -23,9 +22,10 @@ interface CommentFormProps {
   readonly revisions: readonly RevisionSummary[];
   /** The hardpoint it is first pinned to. */
   readonly point: string | undefined;
+  readonly onAdded?: () => void;
 }
 
-export function CommentForm({ revisions, point }: CommentFormProps) {
+export function CommentForm({ revisions, point, onAdded }: CommentFormProps) {
   const { workshopId, studyId, study } = useStudy();
   const { words } = usePreferences();
   const person = useCurrentPerson();
@@ -50,6 +50,7 @@ export function CommentForm({ revisions, point }: CommentFormProps) {
       () => {
         id.current = makeId();
         setText("");
+        onAdded?.();
       },
       () => undefined, // told below; the text stays
     );
@@ -64,36 +65,34 @@ export function CommentForm({ revisions, point }: CommentFormProps) {
     ...revisions.map(({ number }) => ({ value: String(number), label: `Revision ${number}` })),
   ];
   return (
-    <Panel title="Write a comment">
-      <DomForm
-        aria-label="Write a comment"
-        onSubmit={(event) => {
-          event.preventDefault();
-          void submit();
-        }}
-        style={styles.form as object}
-      >
-        <Select
-          label="About"
-          value={pin}
-          options={[{ value: WHOLE_STUDY, label: "The whole study" }, ...points]}
-          onChange={setPin}
-        />
-        {revisions.length > 0 ? (
-          <Select label="Looking at" value={revision} options={shown} onChange={setRevision} />
-        ) : null}
-        <TextArea
-          label="Comment"
-          value={text}
-          onChange={setText}
-          rows={4}
-          maxLength={TEXT_LENGTH}
-          error={message}
-        />
-        {add.error ? <ErrorState title="The comment was not added" error={add.error} /> : null}
-        <Button submit kind="primary" label="Add the comment" busyLabel="Adding…" busy={add.isPending} />
-      </DomForm>
-    </Panel>
+    <DomForm
+      aria-label="Write a comment"
+      onSubmit={(event) => {
+        event.preventDefault();
+        void submit();
+      }}
+      style={styles.form as object}
+    >
+      <Select
+        label="About"
+        value={pin}
+        options={[{ value: WHOLE_STUDY, label: "The whole study" }, ...points]}
+        onChange={setPin}
+      />
+      {revisions.length > 0 ? (
+        <Select label="Looking at" value={revision} options={shown} onChange={setRevision} />
+      ) : null}
+      <TextArea
+        label="Comment"
+        value={text}
+        onChange={setText}
+        rows={4}
+        maxLength={TEXT_LENGTH}
+        error={message}
+      />
+      {add.error ? <ErrorState title="The comment was not added" error={add.error} /> : null}
+      <Button submit kind="primary" label="Add the comment" busyLabel="Adding…" busy={add.isPending} />
+    </DomForm>
   );
 }
 

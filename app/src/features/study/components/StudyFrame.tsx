@@ -1,5 +1,5 @@
 import type { StudyAnswer } from "@linkwright/contract";
-import { usePathname } from "expo-router";
+import { type Href, usePathname } from "expo-router";
 import type { ReactNode } from "react";
 import { StyleSheet, View } from "react-native";
 import { PersonMenu } from "@/features/frame/index.ts";
@@ -68,7 +68,7 @@ function WideHead({ study, buildName, tabs }: HeadProps & { tabs: ReactNode }) {
     <TopBar
       start={
         <>
-          <HomeLink />
+          <HomeLink href="/builds" label="Linkwright, to the builds" />
           <Text numberOfLines={1} style={styles.crumbs}>
             <Link href={{ pathname: "/builds/[buildId]", params: { buildId: study.buildId } }} tone="inkSoft">
               {buildName}
@@ -97,15 +97,14 @@ function PhoneHead({ study, buildName, screenLabel }: HeadProps) {
       <TopBar
         start={
           <>
-            <HomeLink />
+            <HomeLink
+              href={{ pathname: "/builds/[buildId]", params: { buildId: study.buildId } }}
+              label={`Linkwright, back to ${buildName}`}
+            />
             <View style={styles.phoneTitles}>
-              <Link
-                href={{ pathname: "/builds/[buildId]", params: { buildId: study.buildId } }}
-                variant="label"
-                tone="inkSoft"
-              >
+              <Text variant="label" tone="inkSoft" numberOfLines={1}>
                 {`${buildName} · ${study.name}`}
-              </Link>
+              </Text>
               <Heading level={1} variant="section">
                 {screenLabel}
               </Heading>
@@ -125,9 +124,9 @@ function PhoneHead({ study, buildName, screenLabel }: HeadProps) {
   );
 }
 
-function HomeLink() {
+function HomeLink({ href, label }: { href: Href; label: string }) {
   return (
-    <BlockLink href="/builds" className="row-link" label="Linkwright, to the builds" style={styles.home}>
+    <BlockLink href={href} className="row-link" label={label} style={styles.home}>
       <Mark />
     </BlockLink>
   );
