@@ -1,5 +1,5 @@
-import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
+import page from "../../../public/index.html?raw";
 import { type ColorName, type Scheme, schemes } from "./tokens.ts";
 
 function channel(value: number): number {
@@ -57,7 +57,6 @@ describe.each(Object.keys(schemes) as Scheme[])("the %s theme", (scheme) => {
   });
 
   test("the first paint has the ground that the app has", () => {
-    const page = readFileSync(new URL("../../../public/index.html", import.meta.url), "utf8");
     expect(page).toContain(`background: ${palette.ground}`);
   });
 });
