@@ -71,7 +71,8 @@ async function startDatabase(settings: Settings, context: Context, held: Held) {
   };
 }
 
-async function startFakes(settings: Settings, context: Context, held: Held) {
+/** Begun before the database and waited for after it, as neither needs the other. */
+async function beginFakes(settings: Settings, context: Context, held: Held): Promise<Service> {
   const pagePort = await freePort(settings.port + 1);
   const service = startService({
     name: "mail and file server",
@@ -82,8 +83,12 @@ async function startFakes(settings: Settings, context: Context, held: Held) {
     echo: "none",
   });
   held.push(service.stop);
+  return service;
+}
+
+async function waitForFakes(service: Service, context: Context) {
   const ports = (await whileRunning(service, context.stop, service.message)) as FakesReady;
-  return { service, ports, note: `mail at http://127.0.0.1:${ports.pagePort}` };
+  return { ports, note: `mail at http://127.0.0.1:${ports.pagePort}` };
 }
 
 function programEnvironment(settings: Settings, urls: { app: string; owner: string }, ports: FakesReady) {
@@ -114,7 +119,8 @@ async function seedOnce(
   isNew: boolean,
 ) {
   const file = join(settings.folder, "demo-accounts.json");
-  if (isNew || !existsSync(file)) {
+  const isDue = isNew || !existsSync(file);
+  if (isDue) {
     const log = logOf(settings, "seed");
     const args = ["--import", "tsx", join(context.root, "db/src/seed.ts")];
     const how = await runToEnd(
@@ -125,10 +131,10 @@ async function seedOnce(
       throw new PlainProblem(`The demo cannot be seeded (${how}). The end of ${log}:\n${endOfLog(log)}`);
     }
     const lines = readFileSync(log, "utf8").split("\n");
-    const accounts = lines.filter((line) => line.startsWith("{")).map((line) => JSON.parse(line));
-    writeFileSync(file, JSON.stringify(accounts));
+    writeFileSync(file, `[${lines.filter((line) => line.startsWith("{")).join()}]`);
   }
-  return JSON.parse(readFileSync(file, "utf8")) as Record<string, unknown>[];
+  const accounts = JSON.parse(readFileSync(file, "utf8")) as Record<string, unknown>[];
+  return { accounts, note: isDue ? "" : "was done before" };
 }
 
 async function waitUntilReady(service: Service, settings: Settings, context: Context): Promise<void> {
@@ -172,27 +178,28 @@ async function startPrograms(
 
 export async function startServices(settings: Settings, context: Context, held: Held): Promise<Running> {
   mkdirSync(join(settings.folder, "logs"), { recursive: true });
+  const fakesService = await beginFakes(settings, context, held);
   const database = await context.step("Starting the database", () => startDatabase(settings, context, held));
   await context.step("Bringing its tables up to date", () => migrateDatabase(database.urls.owner));
   context.stop.throwIfAborted();
   const fakes = await context.step("Starting mail and file storage", () =>
-    startFakes(settings, context, held),
+    waitForFakes(fakesService, context),
   );
   const env = programEnvironment(settings, database.urls, fakes.ports);
-  const accounts = await context.step("Seeding the demo", () =>
+  const demo = await context.step("Seeding the demo", () =>
     seedOnce(settings, context, { ...env, DATABASE_OWNER_URL: database.urls.owner }, database.isNew),
   );
   const programs = await context.step("Starting the web server and the job worker", () =>
     startPrograms(settings, context, held, env),
   );
-  const ends = [...programs, fakes.service].map(async ({ name, exited, log }) => ({
+  const ends = [...programs, fakesService].map(async ({ name, exited, log }) => ({
     name,
     how: await exited,
     log,
   }));
   return {
     mailUrl: `http://127.0.0.1:${fakes.ports.pagePort}`,
-    accounts,
+    accounts: demo.accounts,
     firstEnd: Promise.race([database.ended, ...ends]),
   };
 }

@@ -18,7 +18,7 @@ export function createSteps(stop, write = (text) => process.stdout.write(text)) 
       write(`  ${title} … `);
       try {
         const result = await work();
-        const note = typeof result?.note === "string" ? `${result.note}, ` : "";
+        const note = result?.note ? `${result.note}, ` : "";
         write(`${note}${seconds(performance.now() - from)}\n`);
         return result;
       } catch (error) {
