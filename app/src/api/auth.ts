@@ -47,13 +47,14 @@ export function useSignUp() {
   });
 }
 
-export function useSignIn() {
+/** `expectedId`: whose pages are open already; what they have loaded stays if it is they who sign in. */
+export function useSignIn(expectedId?: string) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: SignInRequest) => callApi(authRoutes.signIn, { params: {}, body }),
     onSuccess: (me) => {
       // Whatever another person had loaded on this device goes first.
-      forgetAllButMe(client);
+      if (me.id !== expectedId) forgetAllButMe(client);
       writeStored(SIGNED_IN_KEY, "yes");
       client.setQueryData(ME, me);
     },

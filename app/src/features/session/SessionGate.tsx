@@ -1,6 +1,6 @@
 import type { Me } from "@linkwright/contract";
 import { useQuery, useQueryClient } from "@tanstack/react-query";
-import { Redirect, usePathname } from "expo-router";
+import { Redirect } from "expo-router";
 import { type ReactNode, useEffect, useRef, useState } from "react";
 import { meQuery } from "@/api/auth.ts";
 import { isProblem } from "@/lib/problem.ts";
@@ -18,7 +18,8 @@ const WORKSHOP_KEY = "linkwright.workshop";
 /** Lets through whoever is signed in; others go to sign in and come back to where they wanted. */
 export function SessionGate({ children }: { children: ReactNode }) {
   const { data: me, error, isPending, refetch } = useQuery(meQuery);
-  const path = usePathname();
+  // The address itself: the router knows no path yet while its routes are still being loaded.
+  const [wanted] = useState(() => window.location.pathname + window.location.search);
   const lastMe = useRef<Me | null>(null);
   useExpiryWatch();
 
@@ -38,11 +39,11 @@ export function SessionGate({ children }: { children: ReactNode }) {
       </Page>
     );
   }
-  if (!person) return <Redirect href={{ pathname: "/sign-in", params: { next: path } }} />;
+  if (!person) return <Redirect href={{ pathname: "/sign-in", params: { next: wanted } }} />;
   return (
     <PersonContext.Provider value={person}>
       <WorkshopScope me={person}>{children}</WorkshopScope>
-      {me === null ? <SignInAgainDialog email={person.email} /> : null}
+      {me === null ? <SignInAgainDialog person={person} /> : null}
     </PersonContext.Provider>
   );
 }

@@ -1,5 +1,5 @@
 import { zodResolver } from "@hookform/resolvers/zod";
-import { SignInRequest } from "@linkwright/contract";
+import { type Me, SignInRequest } from "@linkwright/contract";
 import { useRouter } from "expo-router";
 import { Controller, useForm } from "react-hook-form";
 import { View } from "react-native";
@@ -13,19 +13,19 @@ import { TextField } from "@/ui/TextField.tsx";
 import { space } from "@/ui/theme/tokens.ts";
 
 /** The session has ended while a page was open: sign in over it, so that nothing on the page is lost. */
-export function SignInAgainDialog({ email }: { email: string }) {
+export function SignInAgainDialog({ person }: { person: Me }) {
   const router = useRouter();
-  const signIn = useSignIn();
+  const signIn = useSignIn(person.id);
   const { control, handleSubmit } = useForm({
     resolver: zodResolver(SignInRequest),
-    defaultValues: { email, password: "" },
+    defaultValues: { email: person.email, password: "" },
   });
   const submit = handleSubmit((request) => signIn.mutate(request));
   return (
     <Dialog title="Sign in again" onClose={() => router.replace("/")}>
       <DomForm onSubmit={submit} aria-label="Sign in again">
         <View style={{ gap: space.l }}>
-          <Text>{`Your session has ended. What is on this page is kept; sign in as ${email} to go on.`}</Text>
+          <Text>{`Your session has ended. What is on this page is kept; sign in as ${person.email} to go on.`}</Text>
           <Controller
             control={control}
             name="password"

@@ -1,4 +1,5 @@
 import { type RevisionAnswer, shortHash } from "@linkwright/contract";
+import { useRouter } from "expo-router";
 import { useState } from "react";
 import { useSaveRevision } from "@/api/revisions.ts";
 import { useCurrentPerson } from "@/features/session/index.ts";
@@ -7,7 +8,6 @@ import { useStoredText } from "@/lib/useStoredText.ts";
 import { Button } from "@/ui/Button.tsx";
 import { Dialog } from "@/ui/Dialog.tsx";
 import { ErrorState } from "@/ui/ErrorState.tsx";
-import { LinkButton } from "@/ui/Link.tsx";
 import { Notice } from "@/ui/Notice.tsx";
 import { Figure, Text } from "@/ui/Text.tsx";
 import { TextArea } from "@/ui/TextField.tsx";
@@ -73,16 +73,18 @@ export function SaveRevisionDialog({ onClose }: { onClose: () => void }) {
 
 function SavedNotice({ revision, onClose }: { revision: RevisionAnswer; onClose: () => void }) {
   const { buildId, studyId } = useStudy();
+  const router = useRouter();
+  const toSheets = () => {
+    onClose();
+    router.navigate({ pathname: "/builds/[buildId]/studies/[studyId]/sheets", params: { buildId, studyId } });
+  };
   return (
     <Dialog
       title={`Revision ${revision.number} is saved`}
       onClose={onClose}
       actions={
         <>
-          <LinkButton
-            href={{ pathname: "/builds/[buildId]/studies/[studyId]/sheets", params: { buildId, studyId } }}
-            label="Make a sheet of it"
-          />
+          <Button label="Make a sheet of it" onPress={toSheets} />
           <Button kind="primary" label="Go on" onPress={onClose} />
         </>
       }
