@@ -1,4 +1,4 @@
-import { useDeferredValue, useMemo, useState } from "react";
+import { useMemo, useState } from "react";
 import { StyleSheet, View } from "react-native";
 import { ResizablePanes } from "@/ui/ResizablePanes.tsx";
 import { space } from "@/ui/theme/tokens.ts";
@@ -14,6 +14,7 @@ import { heightFigures } from "./series/figures.ts";
 import type { Reading } from "./series/panels.ts";
 import { QUANTITIES, type Quantity } from "./series/sweepHeight.ts";
 import { useReading } from "./series/useReading.ts";
+import { useAtRest } from "./useAtRest.ts";
 import { type Bench, useBench } from "./useBench.ts";
 import { useLastRevision } from "./useLastRevision.ts";
 
@@ -107,9 +108,8 @@ function PhoneCurves({ bench }: { bench: Bench }) {
   );
 }
 
-/** Comes a moment later than the curves, which a drag must not wait for. */
 function Below({ bench, reading }: { bench: Bench; reading: Reading }) {
-  const { axle, heights, targets, range } = useDeferredValue(bench);
+  const { axle, heights, targets, range } = useAtRest(bench);
   const figures = useMemo(
     () => heights.map((height) => heightFigures(axle, height, targets)),
     [axle, heights, targets],

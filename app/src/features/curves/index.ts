@@ -19,5 +19,6 @@ export {
   QUANTITY_KIND,
   quantityName,
 } from "./targets/targetWords.ts";
+export { useAtRest } from "./useAtRest.ts";
 export { type Bench, useBench } from "./useBench.ts";
 export { type Earlier, useLastRevision } from "./useLastRevision.ts";

@@ -15,7 +15,7 @@ import { Comparison, FlattenCurves, Leftover } from "./components/FlattenCurves.
 import { MovesPanel } from "./components/MovesPanel.tsx";
 import { SearchNotes } from "./components/SearchNotes.tsx";
 import { SearchPanel } from "./components/SearchPanel.tsx";
-import { useFlatten } from "./useFlatten.ts";
+import { type FlattenBench, useFlatten } from "./useFlatten.ts";
 
 /** Move the rack until the toe curve is flat at every ride height. */
 export function FlattenScreen() {
@@ -47,7 +47,7 @@ function WideFlatten({ bench }: { bench: Bench }) {
           <MovesPanel bench={flatten} reading={reading} />
           <SearchNotes bench={flatten} reading={reading} />
           <View style={styles.foot}>
-            <SearchPanel bench={flatten} />
+            <Buttons flatten={flatten} />
           </View>
         </View>
       ),
@@ -107,9 +107,24 @@ function PhoneFlatten({ bench }: { bench: Bench }) {
         <StartingTargets units={reading.units} />
       </View>
       <View style={styles.thumb}>
-        <SearchPanel bench={flatten} />
+        <Buttons flatten={flatten} />
       </View>
     </View>
+  );
+}
+
+function Buttons({ flatten }: { flatten: FlattenBench }) {
+  const { search, isMoved, isSound, putBack, apply } = flatten;
+  return (
+    <SearchPanel
+      isBusy={search.state.status === "busy"}
+      isMoved={isMoved}
+      isSound={isSound}
+      onFind={search.find}
+      onCancel={search.cancel}
+      onPutBack={putBack}
+      onApply={apply}
+    />
   );
 }
 

@@ -35,10 +35,12 @@ export function useFlatten({ axle, heights }: Bench): FlattenBench {
     if (outcome.status === "found") dispatch({ type: "answerTaken", moves: outcome.moves });
   });
   const putBack = useCallback(() => dispatch({ type: "putBack" }), [dispatch]);
+  const latest = useRef(wanted);
+  latest.current = wanted;
   const apply = useCallback(() => {
-    changeValues(changesTo(wanted));
+    changeValues(changesTo(latest.current));
     dispatch({ type: "putBack" });
-  }, [changeValues, wanted, dispatch]);
+  }, [changeValues, dispatch]);
   return {
     axle,
     moved: lastSound.current,

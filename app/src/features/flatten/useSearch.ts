@@ -19,8 +19,9 @@ const IDLE: SearchState = { status: "idle" };
 export function useSearch(present: Search, onFound: (outcome: FlattenOutcome) => void) {
   const [state, setState] = useState<SearchState>(IDLE);
   const running = useRef<{ readonly engine: RunningEngine; readonly search: Search } | null>(null);
-  const tell = useRef(onFound);
-  tell.current = onFound;
+  // Read when a search begins or ends, so that the buttons need not render anew with every move.
+  const latest = useRef({ present, onFound });
+  latest.current = { present, onFound };
 
   const stop = useCallback(() => {
     running.current?.engine.stop();
@@ -40,22 +41,24 @@ export function useSearch(present: Search, onFound: (outcome: FlattenOutcome) =>
     setState(IDLE);
   }, [stop]);
 
-  const find = useCallback(async () => {
+  const search = useCallback(async () => {
     stop();
-    const mine = { engine: startEngine(), search: present };
+    const asked = latest.current.present;
+    const mine = { engine: startEngine(), search: asked };
     running.current = mine;
     setState({ status: "busy" });
     try {
-      const outcome = await mine.engine.ask((there) => there.flatten(present.axle, present.request));
+      const outcome = await mine.engine.ask((there) => there.flatten(asked.axle, asked.request));
       if (running.current !== mine) return;
-      setState({ status: "answered", search: present, outcome });
-      tell.current(outcome);
+      setState({ status: "answered", search: asked, outcome });
+      latest.current.onFound(outcome);
     } catch (error) {
       if (running.current === mine) setState({ status: "failed", error });
     } finally {
       if (running.current === mine) stop();
     }
-  }, [present, stop]);
+  }, [stop]);
+  const find = useCallback(() => void search(), [search]);
 
   return { state, find, cancel };
 }

@@ -1,3 +1,4 @@
+export { KeptNotice } from "./components/KeptNotice.tsx";
 export { StepChoice } from "./components/StepChoice.tsx";
 export { StepperRow } from "./components/StepperRow.tsx";
 export { EntryProvider } from "./entry/EntryProvider.tsx";

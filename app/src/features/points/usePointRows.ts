@@ -1,4 +1,4 @@
-import { useCallback, useMemo } from "react";
+import { useCallback, useMemo, useRef } from "react";
 import { usePose } from "@/features/curves/index.ts";
 import { type EditValue, useStudy } from "@/features/study/index.ts";
 import { useEntry } from "./entry/EntryProvider.tsx";
@@ -22,14 +22,17 @@ export function usePointRows(selected: string | null) {
   const listed = selected && listedPoint(study.axle, selected);
   const chosen: PointRow | null = rows.find(({ path }) => path === listed) ?? null;
 
+  // Read when a coordinate is entered, so that rows which did not change need not render anew.
+  const latest = useRef(rows);
+  latest.current = rows;
   const onEnter = useCallback(
     (hardpoint: string, axis: AxisIndex, mm: number) => {
-      const row = rows.find(({ path }) => path === hardpoint);
+      const row = latest.current.find(({ path }) => path === hardpoint);
       if (row === undefined) return;
       const point: EditValue = [...withCoordinate(row.shown, axis, mm)];
       enter(row.editPath, point, fieldOf(hardpoint, axis));
     },
-    [rows, enter],
+    [enter],
   );
   const onPutBack = useCallback((hardpoint: string) => putBack(editPathOf(hardpoint)), [putBack]);
   return { groups, rows, chosen, onEnter, onPutBack };

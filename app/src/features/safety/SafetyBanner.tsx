@@ -41,6 +41,10 @@ function Banner({ reports, onShow }: BannerProps) {
   const listId = useId();
   const [worst] = reports;
   if (worst === undefined) return null;
+  const show = (place: FaultPlace) => {
+    setIsOpen(false);
+    onShow?.(place);
+  };
   const isRed = worst.severity === "red";
   const others = reports.length - 1;
   return (
@@ -70,7 +74,7 @@ function Banner({ reports, onShow }: BannerProps) {
           style={styles.button}
         />
       </View>
-      <View nativeID={listId}>{isOpen ? <FaultList reports={reports} onShow={onShow} /> : null}</View>
+      <View nativeID={listId}>{isOpen ? <FaultList reports={reports} onShow={onShow && show} /> : null}</View>
     </View>
   );
 }

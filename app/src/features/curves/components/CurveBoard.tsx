@@ -1,6 +1,6 @@
 import type { Axle, RideHeight, Target } from "@linkwright/kinematics";
 import { steeringLock } from "@linkwright/kinematics";
-import { useMemo } from "react";
+import { memo, useMemo } from "react";
 import { SteelRule } from "@/ui/rule/SteelRule.tsx";
 import { usePose } from "../pose/PoseProvider.tsx";
 import { chooseHeight, type TravelRange } from "../series/heights.ts";
@@ -45,7 +45,7 @@ export function CurveBoard(props: CurveBoardProps) {
   const common = { targets, range, reading };
   return (
     <CursorStage range={range} units={reading.units} {...(height === undefined ? {} : { height })}>
-      <SteelRule label={`Wheel travel about ${chosen.name}`} />
+      <Rule label={`Wheel travel about ${chosen.name}`} />
       {everyHeightOf !== undefined && isEvery
         ? sweeps.map((sweep, at) => (
             <QuantityPlot
@@ -73,6 +73,9 @@ export function CurveBoard(props: CurveBoardProps) {
     </CursorStage>
   );
 }
+
+/** Still while curves change beside it; its own cursor reaches it past this. */
+const Rule = memo(SteelRule);
 
 const NO_SWEEPS: readonly EarlierSweep[] = [];
 

@@ -1,3 +1,4 @@
+import { memo } from "react";
 import { StyleSheet, View } from "react-native";
 import { formatAngleGradient } from "@/lib/format.ts";
 import { HiddenText } from "@/ui/HiddenText.tsx";
@@ -17,7 +18,8 @@ interface FiguresOfHeightProps {
 }
 
 /** Bump steer of one ride height in figures: how far it swings, its worst, its slope, and whether that will do. */
-export function FiguresOfHeight({ figures, before, reading, isChosen }: FiguresOfHeightProps) {
+export const FiguresOfHeight = memo(function FiguresOfHeight(props: FiguresOfHeightProps) {
+  const { figures, before, reading, isChosen } = props;
   const { height, judgement } = figures;
   const { units } = reading;
   const angle = (deg: number | null) => formatToeAngle(deg, reading);
@@ -40,11 +42,18 @@ export function FiguresOfHeight({ figures, before, reading, isChosen }: FiguresO
         <Item
           label={`Slope, ${wayOf(figures.gradientDegPerMm)}`}
           now={gradient(figures.gradientDegPerMm)}
-          before={before && gradient(before.gradientDegPerMm)}
+          before={
+            before && figureAlone(gradient(before.gradientDegPerMm), gradient(figures.gradientDegPerMm))
+          }
         />
       </View>
     </View>
   );
+});
+
+/** What was before shares the unit of what is; the same value is the same text. */
+function figureAlone(before: string, now: string): string {
+  return before === now ? now : (before.split(" ")[0] ?? before);
 }
 
 /** In bump. */
@@ -53,7 +62,13 @@ function wayOf(gradient: number | null): string {
   return gradient > 0 ? "toe-in" : "toe-out";
 }
 
-function Item({ label, now, before }: { label: string; now: string; before: string | null | undefined }) {
+interface ItemProps {
+  readonly label: string;
+  readonly now: string;
+  readonly before: string | null | undefined;
+}
+
+const Item = memo(function Item({ label, now, before }: ItemProps) {
   return (
     <View style={styles.item}>
       <Text variant="label" tone="inkSoft">
@@ -70,7 +85,7 @@ function Item({ label, now, before }: { label: string; now: string; before: stri
       </View>
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   group: { gap: space.xs, paddingVertical: space.s, borderTopWidth: 1, borderTopColor: color.rule },

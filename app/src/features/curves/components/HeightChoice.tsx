@@ -1,4 +1,5 @@
 import type { RideHeight } from "@linkwright/kinematics";
+import { memo } from "react";
 import { StyleSheet, View } from "react-native";
 import { Choice } from "@/ui/Choice.tsx";
 import { Select } from "@/ui/Select.tsx";
@@ -18,7 +19,7 @@ const ALL = "all";
 const SHORT = 26;
 
 /** The ride height that the rule's zero stands for. */
-export function HeightChoice({ heights, withAll }: HeightChoiceProps) {
+export const HeightChoice = memo(function HeightChoice({ heights, withAll }: HeightChoiceProps) {
   const store = usePoseStore();
   const name = usePose((pose) => pose.height);
   const isEvery = usePose((pose) => pose.isEveryHeight) && withAll === true;
@@ -54,7 +55,7 @@ export function HeightChoice({ heights, withAll }: HeightChoiceProps) {
       {isShort ? <Choice {...common} hideLabel compact /> : <Select {...common} hideLabel />}
     </View>
   );
-}
+});
 
 /** Side by side, a name of two words stays on one line. */
 function unbroken(name: string): string {

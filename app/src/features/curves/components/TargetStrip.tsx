@@ -1,4 +1,4 @@
-import { memo, useDeferredValue, useMemo } from "react";
+import { memo, useMemo } from "react";
 import { StyleSheet, View } from "react-native";
 import { Figure, Text } from "@/ui/Text.tsx";
 import { type ColorName, color, space } from "@/ui/theme/tokens.ts";
@@ -6,6 +6,7 @@ import { useIsWide } from "@/ui/useMediaQuery.ts";
 import type { Reading } from "../series/panels.ts";
 import { type Judgement, judgeTargets, type Verdict } from "../targets/judge.ts";
 import { formatQuantity, quantityName } from "../targets/targetWords.ts";
+import { useAtRest } from "../useAtRest.ts";
 import type { Bench } from "../useBench.ts";
 import { VerdictText } from "./VerdictText.tsx";
 
@@ -24,8 +25,7 @@ const BAR: Readonly<Record<Verdict, ColorName>> = {
 /** Every target with its worst value of all ride heights. Nothing where there are no targets. */
 export const TargetStrip = memo(function TargetStrip({ bench, reading }: TargetStripProps) {
   const { units, words } = reading;
-  // Judging takes a frame's worth of solving: it comes after the curves, which a drag must not wait for.
-  const { axle, heights, targets } = useDeferredValue(bench);
+  const { axle, heights, targets } = useAtRest(bench);
   const isWide = useIsWide();
   const judgements = useMemo(() => judgeTargets(axle, heights, targets), [axle, heights, targets]);
   if (judgements.length === 0) return null;

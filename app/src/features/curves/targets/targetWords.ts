@@ -97,8 +97,10 @@ function formatBound(quantity: TargetQuantity, value: number, units: LengthUnit)
 export function verdictInWords(judgement: Judgement, units: LengthUnit): string {
   const { target, verdict, by } = judgement;
   switch (verdict) {
-    case "inside":
-      return `inside ${boundsInWords(target, units)}`;
+    case "inside": {
+      const isOpen = target.min === null || target.max === null;
+      return `inside${isOpen ? ":" : ""} ${boundsInWords(target, units)}`;
+    }
     case "below":
     case "above": {
       const isBand = target.quantity === "bumpSteerDeg";

@@ -54,6 +54,9 @@ test("bounds and verdicts are told in words and in the reader's units", () => {
   expect(boundsInWords({ quantity: "track", min: 1270, max: 1295.4 }, "inch")).toBe("50.000 to 51.000 in");
   expect(verdictInWords(judge(bump, { value: 0.1, side: "left" }, "Road"), "mm")).toBe("inside ±0.15°");
   expect(verdictInWords(judge(bump, { value: -0.22, side: "left" }, "Road"), "mm")).toBe("outside by 0.070°");
+  expect(verdictInWords(judge(camber, { value: 0, side: "left" }, "Road"), "mm")).toBe(
+    "inside: at least −1.00°",
+  );
   expect(verdictInWords(judge(camber, { value: -1.5, side: "left" }, "Road"), "mm")).toBe("below by 0.50°");
   expect(verdictInWords(judge(camber, { value: null, side: "left" }, "Road"), "mm")).toBe("cannot be judged");
   expect(formatQuantity("camberChangeDegPerMm", -0.02, "inch")).toBe("−0.508 °/in");

@@ -1,4 +1,4 @@
-import { useDeferredValue, useMemo } from "react";
+import { useMemo } from "react";
 import { StyleSheet, View } from "react-native";
 import {
   type Bench,
@@ -10,6 +10,7 @@ import {
   heightFigures,
   type Quantity,
   type Reading,
+  useAtRest,
   useLastRevision,
   usePose,
 } from "@/features/curves/index.ts";
@@ -33,10 +34,11 @@ interface FlattenCurvesProps extends PartProps {
 export function FlattenCurves({ bench, flatten, reading, quantities, height }: FlattenCurvesProps) {
   const { heights, targets, range } = bench;
   const { axle, moved } = flatten;
+  const isDrawn = moved === axle;
   const revision = useLastRevision();
   const earlier = useMemo<readonly Earlier[]>(
-    () => (moved === axle ? revision : [{ label: "before", axle, heights }]),
-    [moved, axle, heights, revision],
+    () => (isDrawn ? revision : [{ label: "before", axle, heights }]),
+    [isDrawn, axle, heights, revision],
   );
   return (
     <View style={height === undefined ? styles.fill : styles.stack}>
@@ -63,10 +65,14 @@ interface ComparisonProps extends PartProps {
   readonly of: "all" | "chosen" | "others";
 }
 
-/** Before and after in figures. Comes a moment later than the curve, which a drag must not wait for. */
+/**
+ * Before and after in figures. Those of the chosen ride height follow its curve; the others come once a drag rests,
+ * so as not to slow it.
+ */
 export function Comparison({ bench, flatten, reading, of }: ComparisonProps) {
-  const { axle, heights, targets, range } = useDeferredValue(bench);
-  const moved = useDeferredValue(flatten.moved);
+  const { axle, heights, targets, range } = bench;
+  const { moved } = flatten;
+  const rested = useAtRest(moved);
   const chosen = chooseHeight(
     heights,
     usePose((pose) => pose.height),
@@ -79,17 +85,21 @@ export function Comparison({ bench, flatten, reading, of }: ComparisonProps) {
     () => asked.map((height) => heightFigures(axle, height, targets)),
     [axle, asked, targets],
   );
-  const figures = useMemo(
-    () => (moved === axle ? before : asked.map((height) => heightFigures(moved, height, targets))),
-    [moved, axle, before, asked, targets],
+  const atRest = useMemo(
+    () => asked.map((height) => heightFigures(rested, height, targets)),
+    [rested, asked, targets],
   );
-  return <HeightsFigures axle={moved} range={range} figures={figures} before={before} reading={reading} />;
+  const figures = useMemo(
+    () => atRest.map((each) => (each.height === chosen ? heightFigures(moved, chosen, targets) : each)),
+    [atRest, chosen, moved, targets],
+  );
+  return <HeightsFigures axle={rested} range={range} figures={figures} before={before} reading={reading} />;
 }
 
-/** What is left at the chosen ride height. */
+/** What is left at the chosen ride height, once a drag rests. */
 export function Leftover({ bench, flatten, reading }: PartProps) {
-  const { heights, targets } = useDeferredValue(bench);
-  const moved = useDeferredValue(flatten.moved);
+  const { heights, targets } = bench;
+  const moved = useAtRest(flatten.moved);
   const chosen = chooseHeight(
     heights,
     usePose((pose) => pose.height),

@@ -1,5 +1,5 @@
 import type { LengthUnit } from "@linkwright/contract";
-import type { Dispatch } from "react";
+import { type Dispatch, memo } from "react";
 import { StyleSheet, View } from "react-native";
 import { StepperRow } from "@/features/points/index.ts";
 import { formatLength, lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "@/lib/format.ts";
@@ -26,7 +26,7 @@ interface MoveRowProps {
 const SLIDE_GRAIN = 0.1;
 
 /** One move: stepper and slide, and whether and how far the search may use it. */
-export function MoveRow(props: MoveRowProps) {
+export const MoveRow = memo(function MoveRow(props: MoveRowProps) {
   const { move, name, help, setting, whyNot, units, step, dispatch } = props;
   const { mm, low, high } = setting;
   const isBarred = whyNot !== null;
@@ -65,7 +65,7 @@ export function MoveRow(props: MoveRowProps) {
       )}
     </View>
   );
-}
+});
 
 function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
   const { isFree, low, high } = setting;

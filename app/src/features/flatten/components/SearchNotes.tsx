@@ -17,7 +17,7 @@ export function SearchNotes({ bench, reading }: { bench: FlattenBench; reading: 
         kind="fault"
         live
         title="The search could not run"
-        actions={<Button label="Try again" onPress={() => void search.find()} />}
+        actions={<Button label="Try again" onPress={search.find} />}
       >
         <Text variant="small">
           {state.error instanceof Error ? state.error.message : "This browser gave it no worker."}

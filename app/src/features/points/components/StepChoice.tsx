@@ -1,4 +1,5 @@
 import type { LengthUnit } from "@linkwright/contract";
+import { memo } from "react";
 import { StyleSheet, View } from "react-native";
 import { unitSymbol } from "@/lib/format.ts";
 import { Choice } from "@/ui/Choice.tsx";
@@ -13,7 +14,7 @@ interface StepChoiceProps {
 }
 
 /** How far one press of a stepper goes. */
-export function StepChoice({ units, step, onChoose }: StepChoiceProps) {
+export const StepChoice = memo(function StepChoice({ units, step, onChoose }: StepChoiceProps) {
   const steps = stepsFor(units);
   const title = `Step, ${unitSymbol(units)}`;
   return (
@@ -31,7 +32,7 @@ export function StepChoice({ units, step, onChoose }: StepChoiceProps) {
       />
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   row: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", gap: space.s },

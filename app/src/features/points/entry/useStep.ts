@@ -1,5 +1,5 @@
 import type { LengthUnit } from "@linkwright/contract";
-import { useState } from "react";
+import { useCallback, useState } from "react";
 import { readStored, writeStored } from "@/lib/storage.ts";
 import { type Step, stepFromStored } from "./steps.ts";
 
@@ -7,9 +7,12 @@ import { type Step, stepFromStored } from "./steps.ts";
 export function useStep(units: LengthUnit) {
   const key = `linkwright.step.${units}`;
   const [step, setStep] = useState(() => stepFromStored(units, readStored(key)));
-  const choose = (next: Step) => {
-    writeStored(key, String(next.size));
-    setStep(next);
-  };
+  const choose = useCallback(
+    (next: Step) => {
+      writeStored(key, String(next.size));
+      setStep(next);
+    },
+    [key],
+  );
   return [step, choose] as const;
 }

@@ -86,9 +86,14 @@ export function textFrom(value: number | null | undefined, kind: FieldKind, unit
   return formatNumber(shownFrom(value, kind, units), { decimals: decimalsFor(kind, units) });
 }
 
+/** A figure and its unit stay on one line. */
+export function unbroken(text: string): string {
+  return text.replaceAll(" ", "\u00a0");
+}
+
 export function labelledValue(value: number | null | undefined, kind: FieldKind, units: LengthUnit): string {
   const text = textFrom(value, kind, units);
   if (text === "") return "not given";
   const unit = unitFor(kind, units);
-  return unit === "°" ? `${text}°` : `${text} ${unit}`.trim();
+  return unit === "°" ? `${text}°` : unbroken(`${text} ${unit}`.trim());
 }

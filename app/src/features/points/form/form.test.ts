@@ -70,6 +70,6 @@ test("fields are gathered into the shape that the document has", () => {
 
 test("what is not given is said in words", () => {
   expect(labelledValue(undefined, "mass", "mm")).toBe("not given");
-  expect(labelledValue(0.64, "share", "mm")).toBe("64.0 %");
+  expect(labelledValue(0.64, "share", "mm")).toBe("64.0\u00a0%");
   expect(labelledValue(-0.75, "angle", "mm")).toBe("−0.75°");
 });

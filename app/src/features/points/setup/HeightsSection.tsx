@@ -8,6 +8,7 @@ import { Button } from "@/ui/Button.tsx";
 import { Text } from "@/ui/Text.tsx";
 import { space } from "@/ui/theme/tokens.ts";
 import { issuesWith } from "../entry/attempt.ts";
+import { unbroken } from "../form/fieldKinds.ts";
 import type { FormField } from "../form/formSchema.ts";
 import { PartDialog } from "../form/PartDialog.tsx";
 import { EntryRow } from "./EntryRow.tsx";
@@ -81,7 +82,7 @@ export function withEntry<Entry>(list: readonly Entry[], at: number, entry: Entr
 }
 
 function heightInWords({ wheelUp, rakeDeg, band }: RideHeight, units: LengthUnit): string {
-  const length = (mm: number) => formatLength(mm, units, { sign: "always" });
+  const length = (mm: number) => unbroken(formatLength(mm, units, { sign: "always" }));
   const rake = rakeDeg === 0 ? "" : `, rake ${formatAngle(rakeDeg)}`;
   return `wheel up ${length(wheelUp)}${rake}, band ${length(band[0])} to ${length(band[1])}`;
 }

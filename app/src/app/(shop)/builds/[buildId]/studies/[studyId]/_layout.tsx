@@ -1,7 +1,7 @@
 import { Slot, useLocalSearchParams } from "expo-router";
 import { PoseProvider, StudySafety } from "@/features/curves/index.ts";
 import { FlattenProvider } from "@/features/flatten/index.ts";
-import { EntryProvider } from "@/features/points/index.ts";
+import { EntryProvider, KeptNotice } from "@/features/points/index.ts";
 import { StudyShell } from "@/features/study/index.ts";
 
 export default function StudyLayout() {
@@ -12,6 +12,7 @@ export default function StudyLayout() {
         <EntryProvider>
           <FlattenProvider>
             <StudySafety>
+              <KeptNotice />
               <Slot />
             </StudySafety>
           </FlattenProvider>
