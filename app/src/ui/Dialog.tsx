@@ -26,6 +26,9 @@ export function Dialog({ title, onClose, children, actions, width = 560 }: Dialo
   useLayoutEffect(() => {
     const element = dialog.current;
     element?.showModal();
+    // The browser would take the first thing that can be focused, which is the way out.
+    const field = element?.querySelector<HTMLElement>("input:not([type=radio]), textarea, select");
+    (field ?? element?.querySelector("h2"))?.focus();
     return () => element?.close();
   }, []);
 
@@ -41,7 +44,7 @@ export function Dialog({ title, onClose, children, actions, width = 560 }: Dialo
     >
       <View style={[styles.box, isMedium ? { width, maxWidth: "94vw" as never } : styles.sheetBox]}>
         <View style={styles.head}>
-          <Heading level={2} nativeID={titleId} style={styles.title}>
+          <Heading level={2} nativeID={titleId} tabIndex={-1} style={styles.title}>
             {title}
           </Heading>
           <CloseButton onClose={onClose} />

@@ -3,10 +3,10 @@
 import type { CornerPlacement, Side, Wheel } from "@linkwright/kinematics";
 import { add, cross, findUnit, offset, scale, UP, type Vec3 } from "./vectors.ts";
 
-/** A right-handed frame that does not turn with the wheel: `down` stays in the wheel plane, at its lowest. */
+/** A right-handed frame that does not turn with the wheel: in its plane `level` is horizontal and `down` at its lowest. */
 export interface WheelFrame {
   readonly centre: Vec3;
-  readonly forward: Vec3;
+  readonly level: Vec3;
   readonly down: Vec3;
   readonly outboard: Vec3;
 }
@@ -46,7 +46,7 @@ export function findWheelFrame(placement: CornerPlacement): WheelFrame | null {
   const { spinAxis, wheelCentre } = placement;
   const down = findUnit(add(scale(UP, -1), scale(spinAxis, spinAxis[2])));
   if (down === null) return null;
-  return { centre: wheelCentre, forward: cross(down, spinAxis), down, outboard: spinAxis };
+  return { centre: wheelCentre, level: cross(down, spinAxis), down, outboard: spinAxis };
 }
 
 /** Lowest point of the circle of the loaded radius about the wheel centre, in the wheel plane. */
@@ -93,7 +93,7 @@ export function flatten(down: number, loadedRadius: number): number {
   return Math.min(down, loadedRadius);
 }
 
-/** A ring as a closed chain of points: x forward, y down, z outboard of the wheel centre. */
+/** A ring as a closed chain of points: x level, y down, z outboard of the wheel centre. */
 export function ringPoints(ring: Ring, loadedRadius: number, segments: number): Vec3[] {
   return Array.from({ length: segments + 1 }, (_, k) => {
     const angleRad = (2 * Math.PI * k) / segments;
@@ -103,5 +103,5 @@ export function ringPoints(ring: Ring, loadedRadius: number, segments: number): 
 }
 
 export function fromWheelFrame(frame: WheelFrame, [x, y, z]: Vec3): Vec3 {
-  return offset(offset(offset(frame.centre, frame.forward, x), frame.down, y), frame.outboard, z);
+  return offset(offset(offset(frame.centre, frame.level, x), frame.down, y), frame.outboard, z);
 }

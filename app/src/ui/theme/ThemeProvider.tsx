@@ -1,4 +1,4 @@
-import { createContext, type ReactNode, useContext, useEffect, useMemo, useState } from "react";
+import { createContext, type ReactNode, useCallback, useContext, useEffect, useMemo, useState } from "react";
 import { readStored, removeStored, writeStored } from "@/lib/storage.ts";
 import { useMediaQuery } from "../useMediaQuery.ts";
 import { awaitFonts } from "./fonts.ts";
@@ -38,20 +38,22 @@ export function ThemeProvider({ children }: { children: ReactNode }) {
   const prefersDark = useMediaQuery("(prefers-color-scheme: dark)");
   const fontsSettled = useFontsSettled();
 
+  // Its identity stays, so that effects which set the theme do not run because it was set.
+  const chooseTheme = useCallback((next: ThemeChoice) => {
+    if (next === "system") {
+      removeStored(STORAGE_KEY);
+      delete document.documentElement.dataset.theme;
+    } else {
+      writeStored(STORAGE_KEY, next);
+      document.documentElement.dataset.theme = next;
+    }
+    setChoice(next);
+  }, []);
+
   const theme = useMemo<Theme>(() => {
     const scheme = choice === "system" ? (prefersDark ? "dark" : "light") : choice;
-    const chooseTheme = (next: ThemeChoice) => {
-      if (next === "system") {
-        removeStored(STORAGE_KEY);
-        delete document.documentElement.dataset.theme;
-      } else {
-        writeStored(STORAGE_KEY, next);
-        document.documentElement.dataset.theme = next;
-      }
-      setChoice(next);
-    };
     return { choice, scheme, palette: schemes[scheme], chooseTheme };
-  }, [choice, prefersDark]);
+  }, [choice, prefersDark, chooseTheme]);
 
   return <ThemeContext.Provider value={theme}>{fontsSettled ? children : null}</ThemeContext.Provider>;
 }

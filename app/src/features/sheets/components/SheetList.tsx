@@ -94,5 +94,11 @@ const styles = StyleSheet.create({
     marginTop: -1,
   },
   words: { flexGrow: 1, flexBasis: 260, gap: space.hair },
-  state: { flexDirection: "row", alignItems: "center", flexWrap: "wrap", gap: space.m },
+  state: {
+    flexDirection: "row",
+    alignItems: "center",
+    alignContent: "center",
+    flexWrap: "wrap",
+    gap: space.m,
+  },
 });

@@ -16,7 +16,7 @@ export function TroubleBar() {
   const { trouble } = state;
   const notices = [
     issues.length > 0 ? <UnsoundNotice key="unsound" issues={issues} /> : null,
-    trouble ? <TroubleNotice key="trouble" /> : null,
+    trouble && trouble.status !== "conflict" ? <TroubleNotice key="trouble" /> : null,
     isKeptOnDevice ? null : <NotKeptNotice key="notKept" />,
   ].filter(Boolean);
   return notices.length > 0 ? <View style={styles.bar}>{notices}</View> : null;

@@ -1,0 +1,2 @@
+export { LinkageView, type LinkageViewProps } from "./LinkageView.tsx";
+export type { ViewName } from "./viewPlaces.ts";
