@@ -7,14 +7,9 @@ import { type Direction, distance, type Point } from "../geometry/vec3.ts";
 import type { Axle } from "../model/axle.ts";
 import { type CornerDesign, designCorner, type Side, TIE_ROD, tieRodRow } from "../model/design.ts";
 import { steeringKind } from "../model/steering/index.ts";
-import {
-  compileSystem,
-  equationIndex,
-  type PoseSystem,
-  setBodyPoint,
-  setValue,
-} from "../solver/constraints.ts";
+import { equationIndex, type PoseSystem, setBodyPoint, setValue } from "../solver/constraints.ts";
 import { branchOf, follow, followColumn } from "../solver/continuation.ts";
+import { assembleSystem } from "../solver/pivotOrder.ts";
 import { rowThatRanOut } from "../solver/ranOut.ts";
 import { radFromDeg } from "../units.ts";
 
@@ -60,7 +55,7 @@ export type CornerSolverOutcome =
 export function prepareCorner(axle: Axle, side: Side, wheelUp = 0): CornerSolverOutcome {
   const design = designCorner(axle, side);
   const rows = [...design.parts.rows, tieRodRow(design, design.tieRod.inner, design.tieRod.length)];
-  const system = compileSystem(rows, [wheelHeightDrive(design)]);
+  const system = assembleSystem(rows, [wheelHeightDrive(design)]);
   const branch = branchOf(system);
   if (branch === 0) return { status: "singular", side };
   const common = {
@@ -95,7 +90,7 @@ type ToeSet =
  */
 function setToe(design: CornerDesign, wheelUp: number): ToeSet {
   const toeRad = radFromDeg(design.wheel.toeDeg);
-  const system = compileSystem(design.parts.rows, [
+  const system = assembleSystem(design.parts.rows, [
     wheelHeightDrive(design),
     {
       kind: "drivenDirection",
@@ -183,89 +178,95 @@ export interface TravelColumn {
  */
 export function travelColumn(solver: CornerSolver, travels: readonly number[]): TravelColumn {
   const { wheelUp } = solver;
-  const poses = new Float64Array(travels.length * POSE_NUMBERS);
-  const reached = new Uint8Array(travels.length);
-  const ends: { lastTravel: number; link: string }[] = [];
+  const column = {
+    travels,
+    poses: new Float64Array(travels.length * POSE_NUMBERS),
+    reached: new Uint8Array(travels.length),
+    ends: [] as { lastTravel: number; link: string }[],
+  };
   const order = ascending(travels);
-  const split = order.findIndex((index) => (travels[index] as number) >= wheelUp);
-  const first = split < 0 ? order.length : split;
-  const origin = Float64Array.from(solver.system.pose);
-  let known: KnownPoses = { values: [wheelUp], poses: origin };
-  for (const way of [order.slice(first), order.slice(0, first).reverse()]) {
-    if (way.length === 0) continue;
-    const values = way.map((index) => travels[index] as number);
-    const column = oneWay(solver, known, values);
-    for (const [place, index] of way.entries()) {
-      if (place >= column.solved) break;
-      const from = (known.values.length + place) * POSE_NUMBERS;
-      for (let k = 0; k < POSE_NUMBERS; k++) {
-        poses[index * POSE_NUMBERS + k] = column.poses[from + k] as number;
-      }
-      reached[index] = 1;
-    }
-    if (column.end !== null) ends.push(column.end);
-    known = lookingBack(wheelUp, values, column, known.values.length);
-  }
-  return { travels, poses, reached, ends };
+  let first = 0;
+  while (first < order.length && (travels[order[first] as number] as number) < wheelUp) first++;
+  const up = order.subarray(first);
+  const down = order.slice(0, first).reverse();
+  const start = { values: Float64Array.of(wheelUp), poses: Float64Array.from(solver.system.pose) };
+  const risen = goOneWay(solver, start, up, column);
+  if (down.length > 0) goOneWay(solver, lookingBack(wheelUp, risen), down, column);
+  return column;
 }
 
-interface KnownPoses {
-  readonly values: number[];
+/** Travels and their poses, 7 numbers each, in the order in which they were come to. */
+interface Track {
+  readonly values: Float64Array;
   readonly poses: Float64Array;
 }
 
-interface OneWay {
-  /** The known poses, then the new ones. */
-  readonly poses: Float64Array;
-  /** How many of the new travels were reached. */
-  readonly solved: number;
-  readonly end: { lastTravel: number; link: string } | null;
-}
-
-/** Follows travels away from the last of the known poses, where the system is put first. */
-function oneWay(solver: CornerSolver, known: KnownPoses, travels: readonly number[]): OneWay {
+/**
+ * Follows the travels at `places` away from the last pose of `known`, writes what is reached into `column`, and
+ * returns the track: the known poses and the new ones.
+ */
+function goOneWay(
+  solver: CornerSolver,
+  known: Track,
+  places: Int32Array,
+  column: TravelColumn & { readonly ends: { lastTravel: number; link: string }[] },
+): Track {
   const { system, wheelHeight } = solver;
   const height = solver.design.p_K_wheelCentre[2];
   const count = known.values.length;
-  const values = new Float64Array(count + travels.length);
-  for (let i = 0; i < values.length; i++) {
-    values[i] = height + ((i < count ? known.values[i] : travels[i - count]) as number);
+  const heights = new Float64Array(count + places.length);
+  for (let i = 0; i < count; i++) heights[i] = height + (known.values[i] as number);
+  for (let k = 0; k < places.length; k++) {
+    heights[count + k] = height + (column.travels[places[k] as number] as number);
   }
-  const poses = new Float64Array(values.length * POSE_NUMBERS);
+  const poses = new Float64Array(heights.length * POSE_NUMBERS);
   poses.set(known.poses);
-  for (let k = 0; k < POSE_NUMBERS; k++) {
-    system.pose[k] = poses[(count - 1) * POSE_NUMBERS + k] as number;
-  }
-  setValue(system, wheelHeight, values[count - 1] as number);
+  copyPose(poses, count - 1, system.pose, 0);
+  setValue(system, wheelHeight, heights[count - 1] as number);
   const limit = new Float64Array(1);
-  const solved = followColumn(system, wheelHeight, values, poses, count, solver.branch, limit);
-  const end =
-    solved === values.length
-      ? null
-      : { lastTravel: (limit[0] as number) - height, link: rowThatRanOut(system, [WHEEL_HEIGHT]) };
-  return { poses, solved: solved - count, end };
+  const solved = followColumn(system, wheelHeight, heights, poses, count, solver.branch, limit);
+  for (let i = count; i < solved; i++) {
+    const place = places[i - count] as number;
+    copyPose(poses, i, column.poses, place);
+    column.reached[place] = 1;
+  }
+  if (solved < heights.length) {
+    const lastTravel = (limit[0] as number) - height;
+    column.ends.push({ lastTravel, link: rowThatRanOut(system, [WHEEL_HEIGHT]) });
+  }
+  return { values: heights.subarray(0, solved).map((value) => value - height), poses };
 }
 
 /**
  * The first poses of the way up, in the order in which the way down comes to them: with them behind it, the way
- * down is predicted from its first step. `origin` stands at the ride height.
+ * down is predicted from its first step. The track up begins at the ride height.
  */
-function lookingBack(wheelUp: number, values: readonly number[], up: OneWay, before: number): KnownPoses {
-  const distinct = values[0] === wheelUp ? 1 : 0;
-  const back = Math.max(0, Math.min(3, up.solved - distinct));
-  const known: KnownPoses = { values: [], poses: new Float64Array((back + 1) * POSE_NUMBERS) };
-  for (let k = back; k >= 0; k--) {
-    known.values.push(k === 0 ? wheelUp : (values[k - 1 + distinct] as number));
-    const from = (k === 0 ? before - 1 : before + k - 1 + distinct) * POSE_NUMBERS;
-    known.poses.set(up.poses.subarray(from, from + POSE_NUMBERS), (back - k) * POSE_NUMBERS);
+function lookingBack(wheelUp: number, up: Track): Track {
+  const from = up.values.length > 1 && up.values[1] === wheelUp ? 1 : 0;
+  const count = Math.min(4, up.values.length - from);
+  const values = new Float64Array(count);
+  const poses = new Float64Array(count * POSE_NUMBERS);
+  for (let k = 0; k < count; k++) {
+    values[count - 1 - k] = up.values[from + k] as number;
+    copyPose(up.poses, from + k, poses, count - 1 - k);
   }
-  return known;
+  return { values, poses };
+}
+
+function copyPose(from: Float64Array, index: number, to: Float64Array, place: number): void {
+  const read = index * POSE_NUMBERS;
+  const write = place * POSE_NUMBERS;
+  for (let k = 0; k < POSE_NUMBERS; k++) to[write + k] = from[read + k] as number;
 }
 
 /** Places of `travels` from the lowest travel to the highest. */
-function ascending(travels: readonly number[]): number[] {
-  const order = travels.map((_, index) => index);
-  const isSorted = travels.every((travel, index) => index === 0 || travel >= (travels[index - 1] as number));
+function ascending(travels: readonly number[]): Int32Array {
+  const order = new Int32Array(travels.length);
+  let isSorted = true;
+  for (let i = 0; i < order.length; i++) {
+    order[i] = i;
+    if (i > 0 && (travels[i] as number) < (travels[i - 1] as number)) isSorted = false;
+  }
   return isSorted ? order : order.sort((a, b) => (travels[a] as number) - (travels[b] as number));
 }
 

@@ -77,13 +77,15 @@ export function followColumn(
 ): number {
   const { pose, table, report } = system;
   const slot = drive * STRIDE + 9;
+  let run = evenlySpaced(values, known - 1);
   for (let i = known; i < values.length; i++) {
     const value = values[i] as number;
     const step = Math.abs(value - (values[i - 1] as number));
+    run = goesOnEvenly(values, i) ? run + 1 : 1;
     table[slot] = value;
-    const order = predict(poses, i, values, pose);
+    predict(poses, i, run, pose);
     // A prediction off by more than a tenth of the step has missed a bend: go carefully.
-    const startLimit = CLOSURE + (order === 1 ? Math.min(step, LONGEST_STEP) : 0.1 * step);
+    const startLimit = CLOSURE + (run === 1 ? Math.min(step, LONGEST_STEP) : 0.1 * step);
     // The last elimination stood one Newton step short of the pose: near enough for the determinant's sign.
     if (!(solvePose(system, startLimit) >= 0 && Math.sign(report[0] as number) === branch)) {
       const reached = followStep(system, slot, values, poses, i, branch);
@@ -92,7 +94,8 @@ export function followColumn(
         return i;
       }
     }
-    for (let k = 0; k < POSE; k++) poses[i * POSE + k] = pose[k] as number;
+    const at = i * POSE;
+    for (let k = 0; k < POSE; k++) poses[at + k] = pose[k] as number;
   }
   limit[0] = values[values.length - 1] as number;
   return values.length;
@@ -122,36 +125,47 @@ function followStep(
   return valueAt(outcome.status === "arrived" ? 1 : outcome.fraction);
 }
 
-/** Extrapolates the pose of value `i` from as many evenly spaced poses before it as there are, 1 … 4. */
-function predict(poses: Float64Array, i: number, values: Float64Array, pose: Float64Array): number {
-  const order = evenlySpaced(values, i);
+/**
+ * Extrapolates the pose of value `i` from the poses before it: `run` of them (1 and more) stand as far apart as
+ * value i from the last, and four at most are used.
+ */
+function predict(poses: Float64Array, i: number, run: number, pose: Float64Array): void {
   const a = (i - 1) * POSE;
   const b = a - POSE;
   const c = b - POSE;
   const d = c - POSE;
-  for (let k = 0; k < POSE; k++) {
-    const last = poses[a + k] as number;
-    if (order === 1) pose[k] = last;
-    else if (order === 2) pose[k] = 2 * last - (poses[b + k] as number);
-    else if (order === 3) pose[k] = 3 * (last - (poses[b + k] as number)) + (poses[c + k] as number);
-    else {
-      const middle = 4 * (poses[c + k] as number) - 6 * (poses[b + k] as number);
-      pose[k] = 4 * last + middle - (poses[d + k] as number);
+  if (run === 1) {
+    for (let k = 0; k < POSE; k++) pose[k] = poses[a + k] as number;
+    return;
+  }
+  if (run === 2) {
+    for (let k = 0; k < POSE; k++) pose[k] = 2 * (poses[a + k] as number) - (poses[b + k] as number);
+  } else if (run === 3) {
+    for (let k = 0; k < POSE; k++) {
+      pose[k] = 3 * ((poses[a + k] as number) - (poses[b + k] as number)) + (poses[c + k] as number);
+    }
+  } else {
+    for (let k = 0; k < POSE; k++) {
+      const outer = 4 * ((poses[a + k] as number) + (poses[c + k] as number));
+      pose[k] = outer - 6 * (poses[b + k] as number) - (poses[d + k] as number);
     }
   }
-  if (order > 1) makeUnit(pose);
-  return order;
+  makeUnit(pose);
 }
 
-/** How many values before `i`, at most 4, stand as far apart as value i from the last of them. */
-function evenlySpaced(values: Float64Array, i: number): number {
-  const step = (values[i] as number) - (values[i - 1] as number);
-  const most = Math.min(i, 4);
-  for (let k = 1; k < most; k++) {
-    const earlier = (values[i - k] as number) - (values[i - k - 1] as number);
-    if (!(Math.abs(earlier - step) <= 1e-9 * Math.abs(step))) return k;
-  }
-  return most;
+/** How many values up to and with `last` are evenly spaced, as predict counts them: 1 for a single value. */
+function evenlySpaced(values: Float64Array, last: number): number {
+  let run = 1;
+  for (let i = 2; i <= last; i++) run = goesOnEvenly(values, i) ? run + 1 : 1;
+  return last === 0 ? 0 : run;
+}
+
+/** Whether value i stands as far from the one before as that one from its own. */
+function goesOnEvenly(values: Float64Array, i: number): boolean {
+  if (i < 2) return false;
+  const last = values[i - 1] as number;
+  const step = (values[i] as number) - last;
+  return Math.abs(last - (values[i - 2] as number) - step) <= 1e-9 * Math.abs(step);
 }
 
 function makeUnit(pose: Float64Array): void {
