@@ -3,8 +3,8 @@
 import { type Deg, degFromRad, radFromDeg } from "../units.ts";
 import { type Measured, measured, unmeasured } from "./measured.ts";
 
-/** ° of mean steer under which there is no turn to speak of and the ratio is round-off. */
-const STRAIGHT_WITHIN_DEG = 1e-6;
+/** ° of mean steer. Both differences shrink with its square: nearer to straight, round-off shows in the ratio. */
+const STRAIGHT_WITHIN_DEG = 0.01;
 
 /**
  * 100·(δi − δo)/(δi − δo*), with cot δo* = cot δi + d/L: 100 % is true rolling, 0 is parallel steer. δ: steer of

@@ -8,7 +8,7 @@ import type { Axle } from "../model/axle.ts";
 import { type CornerDesign, designCorner, type Side, TIE_ROD, tieRodRow } from "../model/design.ts";
 import { steeringKind } from "../model/steering/index.ts";
 import { equationIndex, type PoseSystem, setBodyPoint, setValue } from "../solver/constraints.ts";
-import { branchOf, follow, followColumn } from "../solver/continuation.ts";
+import { branchOf, follow, followColumn, type PoseColumn } from "../solver/continuation.ts";
 import { assembleSystem } from "../solver/pivotOrder.ts";
 import { rowThatRanOut } from "../solver/ranOut.ts";
 import { radFromDeg } from "../units.ts";
@@ -34,6 +34,8 @@ export interface CornerSolver {
   readonly tieRodLength: number;
   /** The pose there. */
   readonly start: Float64Array;
+  /** Room for the two ways of a travel column, kept between calls. */
+  readonly workspace: { readonly up: PoseColumn; readonly down: PoseColumn };
 }
 
 export type CornerSolverOutcome =
@@ -66,6 +68,7 @@ export function prepareCorner(axle: Axle, side: Side, wheelUp = 0): CornerSolver
     tieRod: equationIndex(system, TIE_ROD),
     branch,
     wheelUp,
+    workspace: { up: emptyTrack(), down: emptyTrack() },
   };
   if (wheelUp === 0) {
     const start = Float64Array.from(system.pose);
@@ -177,7 +180,7 @@ export interface TravelColumn {
  * Call steerTo first. The system is left somewhere on the way.
  */
 export function travelColumn(solver: CornerSolver, travels: readonly number[]): TravelColumn {
-  const { wheelUp } = solver;
+  const { wheelUp, system, workspace } = solver;
   const column = {
     travels,
     poses: new Float64Array(travels.length * POSE_NUMBERS),
@@ -187,70 +190,75 @@ export function travelColumn(solver: CornerSolver, travels: readonly number[]): 
   const order = ascending(travels);
   let first = 0;
   while (first < order.length && (travels[order[first] as number] as number) < wheelUp) first++;
-  const up = order.subarray(first);
-  const down = order.slice(0, first).reverse();
-  const start = { values: Float64Array.of(wheelUp), poses: Float64Array.from(solver.system.pose) };
-  const risen = goOneWay(solver, start, up, column);
-  if (down.length > 0) goOneWay(solver, lookingBack(wheelUp, risen), down, column);
+  const height = solver.design.p_K_wheelCentre[2];
+  const { up, down } = workspace;
+  makeRoom(up, 1 + order.length - first);
+  up.known = 1;
+  up.values[0] = height + wheelUp;
+  copyPose(system.pose, 0, up.poses, 0);
+  const solved = goOneWay(solver, up, order.slice(first), column);
+  if (first === 0) return column;
+  makeRoom(down, 4 + first);
+  lookBack(up, solved, down);
+  down.count = down.known + first;
+  goOneWay(solver, down, order.slice(0, first).reverse(), column);
   return column;
 }
 
-/** Travels and their poses, 7 numbers each, in the order in which they were come to. */
-interface Track {
-  readonly values: Float64Array;
-  readonly poses: Float64Array;
-}
-
 /**
- * Follows the travels at `places` away from the last pose of `known`, writes what is reached into `column`, and
- * returns the track: the known poses and the new ones.
+ * Follows the travels at `places` away from the last known pose of `track`, writes what is reached into `column`,
+ * and returns how many poses of the track are solved.
  */
 function goOneWay(
   solver: CornerSolver,
-  known: Track,
-  places: Int32Array,
+  track: PoseColumn,
+  places: readonly number[],
   column: TravelColumn & { readonly ends: { lastTravel: number; link: string }[] },
-): Track {
+): number {
   const { system, wheelHeight } = solver;
+  const { known } = track;
   const height = solver.design.p_K_wheelCentre[2];
-  const count = known.values.length;
-  const heights = new Float64Array(count + places.length);
-  for (let i = 0; i < count; i++) heights[i] = height + (known.values[i] as number);
   for (let k = 0; k < places.length; k++) {
-    heights[count + k] = height + (column.travels[places[k] as number] as number);
+    track.values[known + k] = height + (column.travels[places[k] as number] as number);
   }
-  const poses = new Float64Array(heights.length * POSE_NUMBERS);
-  poses.set(known.poses);
-  copyPose(poses, count - 1, system.pose, 0);
-  setValue(system, wheelHeight, heights[count - 1] as number);
-  const limit = new Float64Array(1);
-  const solved = followColumn(system, wheelHeight, heights, poses, count, solver.branch, limit);
-  for (let i = count; i < solved; i++) {
-    const place = places[i - count] as number;
-    copyPose(poses, i, column.poses, place);
+  copyPose(track.poses, known - 1, system.pose, 0);
+  setValue(system, wheelHeight, track.values[known - 1] as number);
+  const solved = followColumn(system, wheelHeight, track, solver.branch);
+  for (let i = known; i < solved; i++) {
+    const place = places[i - known] as number;
+    copyPose(track.poses, i, column.poses, place);
     column.reached[place] = 1;
   }
-  if (solved < heights.length) {
-    const lastTravel = (limit[0] as number) - height;
-    column.ends.push({ lastTravel, link: rowThatRanOut(system, [WHEEL_HEIGHT]) });
+  if (solved < track.count) {
+    const link = rowThatRanOut(system, [WHEEL_HEIGHT]);
+    column.ends.push({ lastTravel: track.limit - height, link });
   }
-  return { values: heights.subarray(0, solved).map((value) => value - height), poses };
+  return solved;
 }
 
 /**
  * The first poses of the way up, in the order in which the way down comes to them: with them behind it, the way
  * down is predicted from its first step. The track up begins at the ride height.
  */
-function lookingBack(wheelUp: number, up: Track): Track {
-  const from = up.values.length > 1 && up.values[1] === wheelUp ? 1 : 0;
-  const count = Math.min(4, up.values.length - from);
-  const values = new Float64Array(count);
-  const poses = new Float64Array(count * POSE_NUMBERS);
-  for (let k = 0; k < count; k++) {
-    values[count - 1 - k] = up.values[from + k] as number;
-    copyPose(up.poses, from + k, poses, count - 1 - k);
+function lookBack(up: PoseColumn, solved: number, down: PoseColumn): void {
+  const from = solved > 1 && up.values[1] === up.values[0] ? 1 : 0;
+  down.known = Math.min(4, solved - from);
+  for (let k = 0; k < down.known; k++) {
+    down.values[down.known - 1 - k] = up.values[from + k] as number;
+    copyPose(up.poses, from + k, down.poses, down.known - 1 - k);
   }
-  return { values, poses };
+}
+
+/** A track for `count` poses: the arrays are made anew only when they are too short. */
+function makeRoom(track: PoseColumn, count: number): void {
+  track.count = count;
+  if (track.values.length >= count) return;
+  track.values = new Float64Array(2 * count);
+  track.poses = new Float64Array(2 * count * POSE_NUMBERS);
+}
+
+function emptyTrack(): PoseColumn {
+  return { values: new Float64Array(0), poses: new Float64Array(0), count: 0, known: 0, limit: 0 };
 }
 
 function copyPose(from: Float64Array, index: number, to: Float64Array, place: number): void {
@@ -260,11 +268,11 @@ function copyPose(from: Float64Array, index: number, to: Float64Array, place: nu
 }
 
 /** Places of `travels` from the lowest travel to the highest. */
-function ascending(travels: readonly number[]): Int32Array {
-  const order = new Int32Array(travels.length);
+function ascending(travels: readonly number[]): number[] {
+  const order: number[] = [];
   let isSorted = true;
-  for (let i = 0; i < order.length; i++) {
-    order[i] = i;
+  for (let i = 0; i < travels.length; i++) {
+    order.push(i);
     if (i > 0 && (travels[i] as number) < (travels[i - 1] as number)) isSorted = false;
   }
   return isSorted ? order : order.sort((a, b) => (travels[a] as number) - (travels[b] as number));

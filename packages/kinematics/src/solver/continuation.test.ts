@@ -40,10 +40,15 @@ const inPlane = (pose: Pose<"V", "K">, point: Vec3): number[] => [...transformPo
 function column(system: PoseSystem, drive: string, values: readonly number[]) {
   const poses = new Float64Array(values.length * POSE);
   poses.set(system.pose);
-  const limit = new Float64Array(1);
-  const index = equationIndex(system, drive);
-  const solved = followColumn(system, index, Float64Array.from(values), poses, 1, branchOf(system), limit);
-  return { poses, solved, limit: limit[0] as number };
+  const track = {
+    values: Float64Array.from(values),
+    poses,
+    count: values.length,
+    known: 1,
+    limit: Number.NaN,
+  };
+  const solved = followColumn(system, equationIndex(system, drive), track, branchOf(system));
+  return { poses, solved, limit: track.limit };
 }
 
 /** F3: a strut whose axis runs through the ball joint, arm and tie rod alike, everything in the front view. */

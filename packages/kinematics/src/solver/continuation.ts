@@ -2,10 +2,11 @@
 // where the linkage turns quickly, and never across a position in which the Jacobian changes sign.
 
 import { EQUATIONS, type PoseSystem, STRIDE } from "./constraints.ts";
-import { CLOSURE, eliminate, evaluate, solvePose } from "./newton.ts";
+import { eliminate } from "./eliminate.ts";
+import { CLOSURE, evaluate, solvePose } from "./newton.ts";
 
 /** mm of input. A path that cannot go on is narrowed down to this; larger blurs the last good travel. */
-const FINEST_STEP = 1e-9;
+const FINEST_STEP = 1e-8;
 
 /** mm of input (or degrees) in one step: well inside what contracts for arms of a car's size. */
 const LONGEST_STEP = 20;
@@ -58,27 +59,32 @@ export function branchOf(system: PoseSystem): number {
   return eliminate(system.work, system.step, system.report) ? Math.sign(system.report[0] as number) : 0;
 }
 
+/** Values of one drive and the poses at them; kept and used again, for typed arrays are dear to make. */
+export interface PoseColumn {
+  values: Float64Array;
+  /** 7 numbers a value: qw qx qy qz tx ty tz. */
+  poses: Float64Array;
+  /** How many values there are; the arrays may be longer. */
+  count: number;
+  /** How many of the first poses are solved already, at least one: the system stands at the last of them. */
+  known: number;
+  /** The last value that could be reached. */
+  limit: number;
+}
+
 /**
- * Solves a column of poses over the values of one drive, the hot path of every sweep: `poses` takes 7 numbers a
- * value (qw qx qy qz tx ty tz), and the first `known` of them are solved already; the system stands at the last of
- * those. Returns how many values were reached; when fewer than all, `limit[0]` is the last value that could be.
+ * Solves a column of poses over the values of one drive, the hot path of every sweep. Returns how many values
+ * were reached.
  *
  * Evenly spaced values are predicted by the polynomial through up to four poses before (error of the order of
  * step⁴), so that one elimination usually closes a pose; what does not close so goes the careful way of `follow`.
  */
-export function followColumn(
-  system: PoseSystem,
-  drive: number,
-  values: Float64Array,
-  poses: Float64Array,
-  known: number,
-  branch: number,
-  limit: Float64Array,
-): number {
+export function followColumn(system: PoseSystem, drive: number, column: PoseColumn, branch: number): number {
+  const { values, poses, count, known } = column;
   const { pose, table, report } = system;
   const slot = drive * STRIDE + 9;
   let run = evenlySpaced(values, known - 1);
-  for (let i = known; i < values.length; i++) {
+  for (let i = known; i < count; i++) {
     const value = values[i] as number;
     const step = Math.abs(value - (values[i - 1] as number));
     run = goesOnEvenly(values, i) ? run + 1 : 1;
@@ -90,15 +96,15 @@ export function followColumn(
     if (!(solvePose(system, startLimit) >= 0 && Math.sign(report[0] as number) === branch)) {
       const reached = followStep(system, slot, values, poses, i, branch);
       if (reached !== value) {
-        limit[0] = reached;
+        column.limit = reached;
         return i;
       }
     }
     const at = i * POSE;
     for (let k = 0; k < POSE; k++) poses[at + k] = pose[k] as number;
   }
-  limit[0] = values[values.length - 1] as number;
-  return values.length;
+  column.limit = values[count - 1] as number;
+  return count;
 }
 
 /** Carries the system from the pose of value i − 1 to value i; returns the value it got to. */

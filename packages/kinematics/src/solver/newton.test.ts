@@ -7,7 +7,8 @@ import type { ConstraintRow, Drive } from "../geometry/rows.ts";
 import type { Point, Vec3 } from "../geometry/vec3.ts";
 import { compileSystem, EQUATIONS, equationIndex, type PoseSystem, setValue } from "./constraints.ts";
 import { branchOf } from "./continuation.ts";
-import { applyTwist, CLOSURE, eliminate, evaluate, solvePose } from "./newton.ts";
+import { eliminate } from "./eliminate.ts";
+import { applyTwist, CLOSURE, evaluate, solvePose } from "./newton.ts";
 
 const WIDTH = EQUATIONS + 1;
 const DEGREE = Math.PI / 180;

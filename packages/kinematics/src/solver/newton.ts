@@ -20,6 +20,7 @@ import {
   type PoseSystem,
   STRIDE,
 } from "./constraints.ts";
+import { eliminate } from "./eliminate.ts";
 
 /** mm. Larger loses digits of toe (0.1 µrad needs 1e-5 mm at 100 mm); smaller meets round-off at 5 m. */
 export const CLOSURE = 1e-10;
@@ -34,10 +35,6 @@ const MOST_ITERATIONS = 12;
 const CONTRACTION = 0.1;
 
 const WIDTH = EQUATIONS + 1;
-const SIZE = EQUATIONS * WIDTH;
-
-/** mm or 1. A pivot this small is round-off of rows whose entries are 1 (directions) and 100 … 1000 (moments). */
-const SMALLEST_PIVOT = 1e-13;
 
 /**
  * Moves `system.pose` on to the nearest solution. Returns the number of eliminations, or −1 when a step did not
@@ -68,6 +65,15 @@ export function misclosure(system: PoseSystem): number {
   const qx = pose[1] as number;
   const qy = pose[2] as number;
   const qz = pose[3] as number;
+  const r00 = 1 - 2 * (qy * qy + qz * qz);
+  const r01 = 2 * (qx * qy - qw * qz);
+  const r02 = 2 * (qx * qz + qw * qy);
+  const r10 = 2 * (qx * qy + qw * qz);
+  const r11 = 1 - 2 * (qx * qx + qz * qz);
+  const r12 = 2 * (qy * qz - qw * qx);
+  const r20 = 2 * (qx * qz - qw * qy);
+  const r21 = 2 * (qy * qz + qw * qx);
+  const r22 = 1 - 2 * (qx * qx + qy * qy);
   const tx = pose[4] as number;
   const ty = pose[5] as number;
   const tz = pose[6] as number;
@@ -77,57 +83,36 @@ export function misclosure(system: PoseSystem): number {
     const kx = table[at + 3] as number;
     const ky = table[at + 4] as number;
     const kz = table[at + 5] as number;
-    // q × p, twice: p + 2w(q × p) + 2 q × (q × p).
-    const cx = 2 * (qy * kz - qz * ky);
-    const cy = 2 * (qz * kx - qx * kz);
-    const cz = 2 * (qx * ky - qy * kx);
-    const ux = kx + qw * cx + qy * cz - qz * cy;
-    const uy = ky + qw * cy + qz * cx - qx * cz;
-    const uz = kz + qw * cz + qx * cy - qy * cx;
+    // From the car's point to the knuckle's; a drive has its car point at the origin.
+    let dx = r00 * kx + r01 * ky + r02 * kz - (table[at] as number);
+    let dy = r10 * kx + r11 * ky + r12 * kz - (table[at + 1] as number);
+    let dz = r20 * kx + r21 * ky + r22 * kz - (table[at + 2] as number);
+    if (kind !== DRIVEN_DIRECTION) {
+      dx += tx;
+      dy += ty;
+      dz += tz;
+    }
+    const value = table[at + 9] as number;
     let residual: number;
     if (kind === DISTANCE) {
-      const dx = ux + tx - (table[at] as number);
-      const dy = uy + ty - (table[at + 1] as number);
-      const dz = uz + tz - (table[at + 2] as number);
-      const length = table[at + 9] as number;
-      residual = ((dx * dx + dy * dy + dz * dz) / length - length) / 2;
+      residual = ((dx * dx + dy * dy + dz * dz) / value - value) / 2;
     } else {
-      residual = otherResidual(system, e, ux, uy, uz);
+      let nx = table[at + 6] as number;
+      let ny = table[at + 7] as number;
+      let nz = table[at + 8] as number;
+      if (kind === PLANE) {
+        const ax = nx;
+        const ay = ny;
+        nx = r00 * ax + r01 * ay + r02 * nz;
+        ny = r10 * ax + r11 * ay + r12 * nz;
+        nz = r20 * ax + r21 * ay + r22 * nz;
+      }
+      residual = nx * dx + ny * dy + nz * dz - value;
     }
     if (!(Math.abs(residual) <= largest)) largest = Math.abs(residual);
   }
   system.report[1] = largest;
   return largest;
-}
-
-/** r of a plane or a drive, whose knuckle point or direction has been turned to (ux, uy, uz). */
-function otherResidual(system: PoseSystem, e: number, ux: number, uy: number, uz: number): number {
-  const { kinds, table, pose } = system;
-  const at = e * STRIDE;
-  let nx = table[at + 6] as number;
-  let ny = table[at + 7] as number;
-  let nz = table[at + 8] as number;
-  const kind = kinds[e] as number;
-  if (kind === DRIVEN_DIRECTION) return nx * ux + ny * uy + nz * uz - (table[at + 9] as number);
-  const x = ux + (pose[4] as number);
-  const y = uy + (pose[5] as number);
-  const z = uz + (pose[6] as number);
-  if (kind === DRIVEN_POINT) return nx * x + ny * y + nz * z - (table[at + 9] as number);
-  const qw = pose[0] as number;
-  const qx = pose[1] as number;
-  const qy = pose[2] as number;
-  const qz = pose[3] as number;
-  const cx = 2 * (qy * nz - qz * ny);
-  const cy = 2 * (qz * nx - qx * nz);
-  const cz = 2 * (qx * ny - qy * nx);
-  nx += qw * cx + qy * cz - qz * cy;
-  ny += qw * cy + qz * cx - qx * cz;
-  nz += qw * cz + qx * cy - qy * cx;
-  return (
-    nx * (x - (table[at] as number)) +
-    ny * (y - (table[at + 1] as number)) +
-    nz * (z - (table[at + 2] as number))
-  );
 }
 
 /**
@@ -224,139 +209,6 @@ export function evaluate(system: PoseSystem): number {
   }
   system.report[1] = largest;
   return largest;
-}
-
-/**
- * Gauss elimination with row pivoting of a 6 × 7 system in place, solution into `solution`, determinant into
- * report[0]. False when a pivot vanishes: the system is singular and `solution` is not written.
- *
- * The columns are written out, for the pivot row then stays in registers: three times as fast as loops.
- */
-export function eliminate(work: Float64Array, solution: Float64Array, report: Float64Array): boolean {
-  let sign = 1;
-  // Column 0.
-  sign *= bringUpPivot(work, 0);
-  const d0 = work[0] as number;
-  if (!(Math.abs(d0) > SMALLEST_PIVOT)) return singular(report);
-  const i0 = 1 / d0;
-  const u01 = work[1] as number;
-  const u02 = work[2] as number;
-  const u03 = work[3] as number;
-  const u04 = work[4] as number;
-  const u05 = work[5] as number;
-  const u06 = work[6] as number;
-  for (let row = 7; row < SIZE; row += WIDTH) {
-    const factor = (work[row] as number) * i0;
-    work[row + 1] = (work[row + 1] as number) - factor * u01;
-    work[row + 2] = (work[row + 2] as number) - factor * u02;
-    work[row + 3] = (work[row + 3] as number) - factor * u03;
-    work[row + 4] = (work[row + 4] as number) - factor * u04;
-    work[row + 5] = (work[row + 5] as number) - factor * u05;
-    work[row + 6] = (work[row + 6] as number) - factor * u06;
-  }
-  // Column 1.
-  sign *= bringUpPivot(work, 1);
-  const d1 = work[8] as number;
-  if (!(Math.abs(d1) > SMALLEST_PIVOT)) return singular(report);
-  const i1 = 1 / d1;
-  const u12 = work[9] as number;
-  const u13 = work[10] as number;
-  const u14 = work[11] as number;
-  const u15 = work[12] as number;
-  const u16 = work[13] as number;
-  for (let row = 14; row < SIZE; row += WIDTH) {
-    const factor = (work[row + 1] as number) * i1;
-    work[row + 2] = (work[row + 2] as number) - factor * u12;
-    work[row + 3] = (work[row + 3] as number) - factor * u13;
-    work[row + 4] = (work[row + 4] as number) - factor * u14;
-    work[row + 5] = (work[row + 5] as number) - factor * u15;
-    work[row + 6] = (work[row + 6] as number) - factor * u16;
-  }
-  // Column 2.
-  sign *= bringUpPivot(work, 2);
-  const d2 = work[16] as number;
-  if (!(Math.abs(d2) > SMALLEST_PIVOT)) return singular(report);
-  const i2 = 1 / d2;
-  const u23 = work[17] as number;
-  const u24 = work[18] as number;
-  const u25 = work[19] as number;
-  const u26 = work[20] as number;
-  for (let row = 21; row < SIZE; row += WIDTH) {
-    const factor = (work[row + 2] as number) * i2;
-    work[row + 3] = (work[row + 3] as number) - factor * u23;
-    work[row + 4] = (work[row + 4] as number) - factor * u24;
-    work[row + 5] = (work[row + 5] as number) - factor * u25;
-    work[row + 6] = (work[row + 6] as number) - factor * u26;
-  }
-  // Column 3.
-  sign *= bringUpPivot(work, 3);
-  const d3 = work[24] as number;
-  if (!(Math.abs(d3) > SMALLEST_PIVOT)) return singular(report);
-  const i3 = 1 / d3;
-  const u34 = work[25] as number;
-  const u35 = work[26] as number;
-  const u36 = work[27] as number;
-  for (let row = 28; row < SIZE; row += WIDTH) {
-    const factor = (work[row + 3] as number) * i3;
-    work[row + 4] = (work[row + 4] as number) - factor * u34;
-    work[row + 5] = (work[row + 5] as number) - factor * u35;
-    work[row + 6] = (work[row + 6] as number) - factor * u36;
-  }
-  // Column 4.
-  sign *= bringUpPivot(work, 4);
-  const d4 = work[32] as number;
-  if (!(Math.abs(d4) > SMALLEST_PIVOT)) return singular(report);
-  const i4 = 1 / d4;
-  const u45 = work[33] as number;
-  const u46 = work[34] as number;
-  for (let row = 35; row < SIZE; row += WIDTH) {
-    const factor = (work[row + 4] as number) * i4;
-    work[row + 5] = (work[row + 5] as number) - factor * u45;
-    work[row + 6] = (work[row + 6] as number) - factor * u46;
-  }
-  // Column 5, then back up.
-  const d5 = work[40] as number;
-  if (!(Math.abs(d5) > SMALLEST_PIVOT)) return singular(report);
-  const x5 = (work[41] as number) / d5;
-  const x4 = (u46 - u45 * x5) * i4;
-  const x3 = (u36 - u34 * x4 - u35 * x5) * i3;
-  const x2 = (u26 - u23 * x3 - u24 * x4 - u25 * x5) * i2;
-  const x1 = (u16 - u12 * x2 - u13 * x3 - u14 * x4 - u15 * x5) * i1;
-  const x0 = (u06 - u01 * x1 - u02 * x2 - u03 * x3 - u04 * x4 - u05 * x5) * i0;
-  solution[0] = x0;
-  solution[1] = x1;
-  solution[2] = x2;
-  solution[3] = x3;
-  solution[4] = x4;
-  solution[5] = x5;
-  report[0] = sign * d0 * d1 * d2 * d3 * d4 * d5;
-  return true;
-}
-
-/** Exchanges row `column` with the one below it that has the largest entry there; −1 when it did, else 1. */
-function bringUpPivot(work: Float64Array, column: number): 1 | -1 {
-  const top = column * WIDTH;
-  let best = top;
-  let largest = Math.abs(work[top + column] as number);
-  for (let row = top + WIDTH; row < SIZE; row += WIDTH) {
-    const size = Math.abs(work[row + column] as number);
-    if (size > largest) {
-      largest = size;
-      best = row;
-    }
-  }
-  if (best === top) return 1;
-  for (let k = column; k < WIDTH; k++) {
-    const kept = work[top + k] as number;
-    work[top + k] = work[best + k] as number;
-    work[best + k] = kept;
-  }
-  return -1;
-}
-
-function singular(report: Float64Array): false {
-  report[0] = 0;
-  return false;
 }
 
 /**
