@@ -1,7 +1,7 @@
 import { useEffect, useState } from "react";
 
-/** Two frames and a bit: the end of a drag, not a pause within it. */
-const REST_MS = 120;
+/** The end of a drag, not a slow frame within it: without a graphics card a frame takes well over 100 ms. */
+const REST_MS = 250;
 
 /** A value once it has rested: for what need not follow every frame of a drag and would only slow it. */
 export function useAtRest<Value>(value: Value): Value {

@@ -1,22 +1,47 @@
-import { createContext, type Dispatch, type ReactNode, useContext, useMemo, useReducer } from "react";
+import {
+  createContext,
+  type Dispatch,
+  type ReactNode,
+  useContext,
+  useState,
+  useSyncExternalStore,
+} from "react";
 import { type MoveAction, type MoveSettings, movesReducer, NO_MOVES } from "./moves.ts";
 
-interface MovesHandle {
-  readonly settings: MoveSettings;
+interface MovesStore {
+  readonly get: () => MoveSettings;
   readonly dispatch: Dispatch<MoveAction>;
+  readonly subscribe: (notify: () => void) => () => void;
 }
 
-const MovesContext = createContext<MovesHandle | null>(null);
+/** Outside React's state: a context that changed with every move would render anew whatever bridges contexts. */
+function createMovesStore(): MovesStore {
+  let settings = NO_MOVES;
+  const listeners = new Set<() => void>();
+  return {
+    get: () => settings,
+    dispatch: (action) => {
+      settings = movesReducer(settings, action);
+      for (const notify of listeners) notify();
+    },
+    subscribe: (notify) => {
+      listeners.add(notify);
+      return () => listeners.delete(notify);
+    },
+  };
+}
+
+const MovesContext = createContext<MovesStore | null>(null);
 
 /** Stands above the screens of a study, so that moves not yet applied outlive a tab. */
 export function FlattenProvider({ children }: { children: ReactNode }) {
-  const [settings, dispatch] = useReducer(movesReducer, NO_MOVES);
-  const handle = useMemo(() => ({ settings, dispatch }), [settings]);
-  return <MovesContext.Provider value={handle}>{children}</MovesContext.Provider>;
+  const [store] = useState(createMovesStore);
+  return <MovesContext.Provider value={store}>{children}</MovesContext.Provider>;
 }
 
-export function useMoves(): MovesHandle {
-  const handle = useContext(MovesContext);
-  if (!handle) throw new Error("Moves are held by a FlattenProvider.");
-  return handle;
+export function useMoves() {
+  const store = useContext(MovesContext);
+  if (!store) throw new Error("Moves are held by a FlattenProvider.");
+  const settings = useSyncExternalStore(store.subscribe, store.get);
+  return { settings, dispatch: store.dispatch };
 }

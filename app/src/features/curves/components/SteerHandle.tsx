@@ -31,7 +31,8 @@ export function SteerHandle({ axle, units }: SteerHandleProps) {
   // Along the handle from left to right.
   const at = held(-leftSign * steer, lock);
   const words = steerInWords(axle, -leftSign * at, units);
-  const moveTo = (next: number) => store.change({ steer: -leftSign * held(next, lock) || 0 });
+  const steerAt = (next: number) => ({ steer: -leftSign * held(next, lock) || 0 });
+  const moveTo = (next: number) => store.change(steerAt(next));
   return (
     <View style={styles.handle}>
       <View style={styles.head}>
@@ -43,7 +44,13 @@ export function SteerHandle({ axle, units }: SteerHandleProps) {
           <Button kind="quiet" label="Straighten" onPress={() => moveTo(0)} style={styles.straighten} />
         )}
       </View>
-      <Track at={at} lock={lock} words={words} moveTo={moveTo} />
+      <Track
+        at={at}
+        lock={lock}
+        words={words}
+        moveTo={moveTo}
+        follow={(next) => store.follow(steerAt(next))}
+      />
     </View>
   );
 }
@@ -53,14 +60,16 @@ interface TrackProps {
   readonly lock: number;
   readonly words: string;
   readonly moveTo: (at: number) => void;
+  /** A moving pointer, once a frame. */
+  readonly follow: (at: number) => void;
 }
 
-function Track({ at, lock, words, moveTo }: TrackProps) {
+function Track({ at, lock, words, moveTo, follow }: TrackProps) {
   const [ref, { width }] = useSize<HTMLDivElement>();
-  const follow = (event: PointerEvent<HTMLElement>) => {
+  const placeOf = (event: PointerEvent<HTMLElement>) => {
     const box = event.currentTarget.getBoundingClientRect();
     const share = ((event.clientX - box.left) / box.width) * 2 - 1;
-    moveTo(Math.round((share * lock) / FINE) * FINE);
+    return Math.round((share * lock) / FINE) * FINE;
   };
   return (
     <DomDiv
@@ -77,10 +86,10 @@ function Track({ at, lock, words, moveTo }: TrackProps) {
       onPointerDown={(event: PointerEvent<HTMLElement>) => {
         if (event.button !== 0) return;
         event.currentTarget.setPointerCapture(event.pointerId);
-        follow(event);
+        moveTo(placeOf(event));
       }}
       onPointerMove={(event: PointerEvent<HTMLElement>) => {
-        if (event.currentTarget.hasPointerCapture(event.pointerId)) follow(event);
+        if (event.currentTarget.hasPointerCapture(event.pointerId)) follow(placeOf(event));
       }}
       style={styles.track as object}
     >

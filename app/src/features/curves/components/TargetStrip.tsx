@@ -23,9 +23,14 @@ const BAR: Readonly<Record<Verdict, ColorName>> = {
 };
 
 /** Every target with its worst value of all ride heights. Nothing where there are no targets. */
-export const TargetStrip = memo(function TargetStrip({ bench, reading }: TargetStripProps) {
+export function TargetStrip({ bench, reading }: TargetStripProps) {
+  return <Tiles bench={useAtRest(bench)} reading={reading} />;
+}
+
+/** Still while what is judged has not come to rest. */
+const Tiles = memo(function Tiles({ bench, reading }: TargetStripProps) {
+  const { axle, heights, targets } = bench;
   const { units, words } = reading;
-  const { axle, heights, targets } = useAtRest(bench);
   const isWide = useIsWide();
   const judgements = useMemo(() => judgeTargets(axle, heights, targets), [axle, heights, targets]);
   if (judgements.length === 0) return null;

@@ -21,7 +21,7 @@ const REST_MS = 300;
 export function PoseProvider({ children }: { children: ReactNode }) {
   const params = useGlobalSearchParams();
   const router = useRouter();
-  const [store] = useState(() => createPoseStore(withParams(REST_POSE, params)));
+  const [store] = useState(() => createPoseStore(withParams(REST_POSE, params), requestAnimationFrame));
   const { height, heights, travel, steer, side } = params;
   const asked = useMemo(
     () => ({ height, heights, travel, steer, side }),

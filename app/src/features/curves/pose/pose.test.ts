@@ -28,7 +28,7 @@ test("travel is written to a hundredth of a millimetre", () => {
 });
 
 test("a store tells its readers of a change, and of nothing else", () => {
-  const store = createPoseStore(REST_POSE);
+  const store = createPoseStore(REST_POSE, (act) => act());
   let told = 0;
   const stop = store.subscribe(() => {
     told += 1;
@@ -40,4 +40,26 @@ test("a store tells its readers of a change, and of nothing else", () => {
   store.change({ travel: 6 });
   expect(told).toBe(1);
   expect(store.get().travel).toBe(6);
+});
+
+test("a pointer that tells many moves within a frame is heard once, with the last of them", () => {
+  const frames: (() => void)[] = [];
+  const store = createPoseStore(REST_POSE, (act) => frames.push(act));
+  const heard: number[] = [];
+  store.subscribe(() => heard.push(store.get().travel));
+  store.follow({ travel: 1 });
+  store.follow({ travel: 2 });
+  store.follow({ travel: 3 });
+  expect(heard).toEqual([]);
+  for (const act of frames.splice(0)) act();
+  expect(heard).toEqual([3]);
+});
+
+test("a change made at once is not undone by a move that was still awaited", () => {
+  const frames: (() => void)[] = [];
+  const store = createPoseStore(REST_POSE, (act) => frames.push(act));
+  store.follow({ travel: 3, steer: 4 });
+  store.change({ travel: 10 });
+  for (const act of frames.splice(0)) act();
+  expect(store.get()).toMatchObject({ travel: 10, steer: 4 });
 });

@@ -7,6 +7,7 @@ import { chooseHeight, heightsOf, ruleRange } from "./heights.ts";
 import { lostParts } from "./lost.ts";
 import { panelSeries } from "./panelSeries.ts";
 import { panelStyle } from "./panels.ts";
+import { createSweeper } from "./sweepCache.ts";
 import { curvePoints, sweepHeight } from "./sweepHeight.ts";
 import { TOE_IN_DEGREES, toeShown, toeUnit } from "./toeDisplay.ts";
 
@@ -31,8 +32,8 @@ test("one rule serves all ride heights and shows a little beyond the widest band
 });
 
 test("the toe curve is toe's change from the ride height, with the rod set there", () => {
-  // 32 pieces over 160 mm: the curve has a point at every 5 mm, so at every travel that was worked out.
-  const sweep = sweepHeight(workedAxle, low, { from: -80, to: 80 });
+  // 24 pieces over 240 mm: the curve has a point at every 10 mm, so at every travel that was worked out.
+  const sweep = sweepHeight(workedAxle, low, { from: -120, to: 120 });
   const points = curvePoints(sweep, "toe", "left", TOE_IN_DEGREES);
   const { travels, toeDeg } = workedStudies.rideHeight;
   const atHeight = toeDeg[travels.indexOf(40)] as number;
@@ -114,4 +115,13 @@ test("figures judge the worse side against the target", () => {
   expect(figures.judgement?.by).toBeCloseTo(worst - 0.1, 12);
   expect(figures.gradientDegPerMm).toBeGreaterThan(0);
   expect(heightFigures(workedAxle, road, []).judgement).toBeNull();
+});
+
+test("a sweeper solves the same curve once, and another one anew", () => {
+  const sweep = createSweeper();
+  const first = sweep(workedAxle, road, RANGE, 0);
+  expect(sweep(workedAxle, road, RANGE, 0)).toBe(first);
+  expect(sweep(workedAxle, road, RANGE, 5)).not.toBe(first);
+  expect(sweep(workedAxle, road, RANGE, 0)).toBe(first);
+  expect(first).toEqual(sweepHeight(workedAxle, road, RANGE));
 });

@@ -26,8 +26,10 @@ export interface HeightSweep {
   readonly ends: readonly SweepEnd[];
 }
 
-/** Points of a curve: so many that straight pieces between them do not show. */
-const POINTS = 32;
+/** Pieces of a curve: a straight one stands off the true curve by 1/PIECES² of the whole's bow, less than a pixel. */
+const PIECES = 24;
+/** Away from straight ahead the engine solves every travel twice, for Ackermann; a curve of fewer pieces will do. */
+const STEERED_PIECES = 16;
 
 /** Call it with an axle that checkAxle accepts. */
 export function sweepHeight(
@@ -36,7 +38,7 @@ export function sweepHeight(
   { from, to }: TravelRange,
   steer = 0,
 ): HeightSweep {
-  const travels = bandTravels([from, to], (to - from) / POINTS);
+  const travels = bandTravels([from, to], (to - from) / (steer === 0 ? PIECES : STEERED_PIECES));
   const { wheelUp } = height;
   const absolute = travels.map((travel) => wheelUp + travel);
   const { rows, ends } = sweepAxle(axle, { travels: absolute, steers: [steer], wheelUp });

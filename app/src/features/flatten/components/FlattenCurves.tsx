@@ -35,6 +35,8 @@ export function FlattenCurves({ bench, flatten, reading, quantities, height }: F
   const { heights, targets, range } = bench;
   const { axle, moved } = flatten;
   const isDrawn = moved === axle;
+  // The moves offered change toe and hardly anything else.
+  const rested = useAtRest(moved);
   const revision = useLastRevision();
   const earlier = useMemo<readonly Earlier[]>(
     () => (isDrawn ? revision : [{ label: "before", axle, heights }]),
@@ -46,6 +48,7 @@ export function FlattenCurves({ bench, flatten, reading, quantities, height }: F
       <View style={height === undefined ? styles.board : null}>
         <CurveBoard
           axle={moved}
+          restedAxle={rested}
           heights={heights}
           targets={targets}
           range={range}

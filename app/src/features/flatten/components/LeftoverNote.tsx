@@ -1,13 +1,18 @@
 import { summariseCurve } from "@linkwright/kinematics";
-import { useMemo } from "react";
+import { memo, useMemo } from "react";
 import type { HeightFigures, Reading } from "@/features/curves/index.ts";
 import { Notice } from "@/ui/Notice.tsx";
 import { Text } from "@/ui/Text.tsx";
 import { leftoverInWords } from "../flattenWords.ts";
 import { fitLeftover } from "../leftover.ts";
 
+interface LeftoverNoteProps {
+  readonly figures: HeightFigures;
+  readonly reading: Reading;
+}
+
 /** What is left of the chosen ride height's curve, on its worse side. */
-export function LeftoverNote({ figures, reading }: { figures: HeightFigures; reading: Reading }) {
+export const LeftoverNote = memo(function LeftoverNote({ figures, reading }: LeftoverNoteProps) {
   const { curves, height, judgement } = figures;
   const leftover = useMemo(() => {
     const swing = (curve: (typeof curves)[number]) => summariseCurve(curve)?.peakToPeakDeg ?? -1;
@@ -23,4 +28,4 @@ export function LeftoverNote({ figures, reading }: { figures: HeightFigures; rea
       <Text variant="small">{detail}</Text>
     </Notice>
   );
-}
+});

@@ -4,11 +4,11 @@ import { StyleSheet, View } from "react-native";
 import { StepperRow } from "@/features/points/index.ts";
 import { formatLength, lengthDecimals, lengthFromMm, mmFromLength, unitSymbol } from "@/lib/format.ts";
 import { Checkbox } from "@/ui/Checkbox.tsx";
-import { DomInput } from "@/ui/dom.tsx";
 import { NumberField } from "@/ui/NumberField.tsx";
 import { Text } from "@/ui/Text.tsx";
 import { color, space } from "@/ui/theme/tokens.ts";
 import type { MoveAction, MoveSetting, OfferedMove } from "../moves.ts";
+import { Slide } from "./Slide.tsx";
 
 interface MoveRowProps {
   readonly move: OfferedMove;
@@ -21,9 +21,6 @@ interface MoveRowProps {
   readonly step: number;
   readonly dispatch: Dispatch<MoveAction>;
 }
-
-/** mm: what the slide is read to. */
-const SLIDE_GRAIN = 0.1;
 
 /** One move: stepper and slide, and whether and how far the search may use it. */
 export const MoveRow = memo(function MoveRow(props: MoveRowProps) {
@@ -49,26 +46,35 @@ export const MoveRow = memo(function MoveRow(props: MoveRowProps) {
         </Text>
       ) : (
         <>
-          <DomInput
-            type="range"
-            aria-label={`${name}, slide`}
-            aria-valuetext={formatLength(mm, units, { sign: "always" })}
-            min={low}
-            max={high}
-            step={SLIDE_GRAIN}
+          <Slide
+            label={`${name}, slide`}
             value={mm}
-            onChange={(event) => dispatch({ type: "moved", move, mm: Number(event.currentTarget.value) })}
-            style={styles.slide}
+            from={low}
+            to={high}
+            valueText={formatLength(mm, units, { sign: "always" })}
+            onSlide={(next) => dispatch({ type: "moved", move, mm: next })}
           />
-          <Bounds {...props} />
+          <Bounds
+            move={move}
+            name={name}
+            isFree={setting.isFree}
+            low={low}
+            high={high}
+            units={units}
+            step={step}
+            dispatch={dispatch}
+          />
         </>
       )}
     </View>
   );
 });
 
-function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
-  const { isFree, low, high } = setting;
+type BoundsProps = Pick<MoveRowProps, "move" | "name" | "units" | "step" | "dispatch"> &
+  Pick<MoveSetting, "isFree" | "low" | "high">;
+
+const Bounds = memo(function Bounds(props: BoundsProps) {
+  const { move, name, isFree, low, high, units, step, dispatch } = props;
   const bound = (which: "low" | "high", mm: number) => (
     <View style={styles.bound}>
       <NumberField
@@ -109,11 +115,10 @@ function Bounds({ move, name, setting, units, step, dispatch }: MoveRowProps) {
       ) : null}
     </View>
   );
-}
+});
 
 const styles = StyleSheet.create({
   row: { gap: space.xs, paddingVertical: space.m, borderTopWidth: 1, borderTopColor: color.rule },
-  slide: { width: "100%", height: 32, margin: 0, accentColor: color.dye, cursor: "ew-resize" } as object,
   bounds: { flexDirection: "row", flexWrap: "wrap", alignItems: "center", columnGap: 6 },
   free: { flexGrow: 1 },
   bound: { width: 66, borderWidth: 1, borderColor: color.rule },

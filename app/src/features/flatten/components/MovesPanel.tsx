@@ -1,4 +1,5 @@
 import { whyNotMove } from "@linkwright/kinematics";
+import { useMemo } from "react";
 import { StyleSheet, View } from "react-native";
 import type { Reading } from "@/features/curves/index.ts";
 import { StepChoice, useStep } from "@/features/points/index.ts";
@@ -16,14 +17,20 @@ export function MovesPanel({ bench, reading }: { bench: FlattenBench; reading: R
   const { axle, settings, dispatch, issues } = bench;
   const { units } = reading;
   const [step, chooseStep] = useStep(units);
-  return (
-    <View style={styles.panel}>
+  const head = useMemo(
+    () => (
       <View style={styles.head}>
         <Heading level={2} variant="block">
           Moves
         </Heading>
         <StepChoice units={units} step={step} onChoose={chooseStep} />
       </View>
+    ),
+    [units, step, chooseStep],
+  );
+  return (
+    <View style={styles.panel}>
+      {head}
       <View>
         {OFFERED_MOVES.map((move) => (
           <MoveRow
