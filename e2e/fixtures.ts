@@ -1,6 +1,7 @@
 // Who acts in a test, and the study each test has to itself.
 
 import { randomUUID } from "node:crypto";
+import { RevisionAnswer } from "@linkwright/contract";
 import { test as base, expect, type Page } from "@playwright/test";
 
 export { expect };
@@ -24,8 +25,8 @@ interface Fixtures {
   readonly signInAs: (role: Role) => Promise<void>;
   /** A copy of a demo study of that name, made by the engineer for this test alone. */
   readonly copyStudy: (name: string) => Promise<StudyPlace>;
-  /** Saves the study's draft as its next revision, as the engineer. */
-  readonly saveRevision: (place: StudyPlace) => Promise<void>;
+  /** Saves the study's draft as its next revision, as the engineer; answers what was saved. */
+  readonly saveRevision: (place: StudyPlace) => Promise<RevisionAnswer>;
   readonly openStudy: (place: StudyPlace, tab: string) => Promise<void>;
 }
 
@@ -61,6 +62,7 @@ export const test = base.extend<Fixtures>({
       const data = { id: randomUUID(), version, note: "For the jig" };
       const answer = await page.request.post(`${study}/revisions`, { headers: HEADERS, data });
       expect(answer.status(), await answer.text()).toBe(201);
+      return RevisionAnswer.parse(await answer.json());
     });
   },
   copyStudy: async ({ page }, use) => {

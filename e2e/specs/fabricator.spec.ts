@@ -11,7 +11,7 @@ test("a fabricator makes and downloads the hardpoint table of a saved revision",
   openStudy,
 }) => {
   const study = await copyStudy("Front axle, rack lowered");
-  await saveRevision(study);
+  const revision = await saveRevision(study);
   await signInAs("fabricator");
   await openStudy(study, "sheets");
   await page.getByRole("button", { name: "Make the table" }).click();
@@ -20,7 +20,16 @@ test("a fabricator makes and downloads the hardpoint table of a saved revision",
   const started = page.waitForEvent("download");
   await link.click();
   const text = await readFile(await (await started).path(), "utf8");
-  expect(text).toContain("NOT RELEASED");
-  expect(text).toMatch(/[0-9a-f]{12}/);
-  expect(text).toMatch(/ball joint/i);
+  const lines = text.split("\r\n");
+  expect(lines.some((line) => line.startsWith("NOT RELEASED"))).toBe(true);
+  expect(lines).toContain(`Revision,${revision.number}`);
+  const hash = lines.find((line) => line.startsWith("Hash,"))?.slice("Hash,".length) ?? "";
+  expect(hash.length).toBeGreaterThanOrEqual(8);
+  expect(revision.hash.startsWith(hash)).toBe(true);
+  expect(lines).toContain("Units,mm");
+  // Worked by hand: in the car the joint is at (8, 566, 152). The jig's origin is (210, 0, 120), its x points
+  // rearward and its z up, so its y = z × x points to the right: (210 − 8, −566, 152 − 120).
+  expect(revision.study.axle.left.suspension.lowerArm.ballJoint).toEqual([8, 566, 152]);
+  const row = lines.find((line) => line.startsWith("left,Lower arm,ball joint,"));
+  expect(row?.split(",").slice(3).map(Number)).toEqual([202, -566, 32]);
 });
