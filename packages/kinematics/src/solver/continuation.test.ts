@@ -17,7 +17,7 @@ const UP: Vec3 = [0, 0, 1];
 const END = asStated(
   1e-6,
   "mm",
-  "a fold is narrowed down to steps of 1e-9 mm; a kit is never measured finer than 1e-2",
+  "a fold is narrowed down to steps of 1e-8 mm; a kit is never measured finer than 1e-2",
 );
 
 const rod = (name: string, bodyPoint: Vec3, knucklePoint: Vec3): ConstraintRow => ({
